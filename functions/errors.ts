@@ -211,10 +211,6 @@ const TABLE = {
     says: 'the equilibrium was not found: {status}, {reason}',
     remedy: 'EXTENT.EVIDENCE with the same arguments tells more.',
   },
-  'feed-infeasible': {
-    says: 'no extent of {equation} leaves every amount at 0 or more',
-    remedy: 'Take out less, or feed more.',
-  },
   'extent-infeasible': {
     says: 'the extent {extent} makes an amount negative; it may be {lowest} to {highest}',
     remedy: 'Give an extent between them, or take it from EXTENT.SOLVE.',

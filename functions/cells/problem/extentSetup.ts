@@ -1,0 +1,108 @@
+/**
+ * From the words of a sheet to a problem for the one-reaction solver, and back to the units of the sheet.
+ */
+import type { CheckedReaction } from '../../chemistry/balancedEquation.ts';
+import { GAS_CONSTANT } from '../../data/constants.ts';
+import type { ExtentProblem } from '../../equilibrium/extentProblem.ts';
+import { inputError } from '../../errors.ts';
+import type { AmountsTable } from '../reading/amounts.ts';
+import { type Conditions, NO_CONDITIONS } from '../reading/conditions.ts';
+import { linePlace } from '../reading/tableForm.ts';
+import { unitText } from './basis.ts';
+import { lnReference } from './constant.ts';
+import type { Fed } from './fed.ts';
+import { feedOf } from './feed.ts';
+import { countsInMedium, type Setting, settingOf } from './medium.ts';
+import { LITRE_BAR_PER_JOULE, pressureBar, temperatureK, volumeL } from './state.ts';
+
+export interface ExtentSetup {
+  readonly reaction: CheckedReaction;
+  readonly table: AmountsTable;
+  readonly conditions: Conditions;
+  readonly setting: Setting;
+  readonly fed: Fed;
+  readonly problem: ExtentProblem;
+  /** ln K on the activity basis less ln K as stated; ln Q in the stated terms is ln Q less this. */
+  readonly lnBasisShift: number;
+}
+
+/**
+ * The problem that an equation, ln K as stated, amounts and conditions state together.
+ *
+ * Errors: those of the medium, the constant, the amounts and the conditions.
+ */
+export function extentSetup(
+  reaction: CheckedReaction,
+  lnK: number,
+  table: AmountsTable,
+  conditions: Conditions = NO_CONDITIONS,
+): ExtentSetup {
+  const setting = settingOf(reaction, conditions);
+  const { fed, feed } = feedOf(reaction, table, conditions.rows.has('removal'));
+  checkInert(reaction, conditions, fed);
+  checkAsGiven(setting, fed);
+  const { change, mixed, isFraction } = setting;
+  const lnBasisShift = change === 0 ? 0 : change * lnReference(setting, conditions, fed.reference);
+  const problem: ExtentProblem = {
+    species: setting.species,
+    stoichiometry: reaction.stoichiometry,
+    feed,
+    mixed,
+    activity: isFraction ? 'fraction' : 'amount',
+    lnScale: change === 0 ? 0 : lnScale(setting, fed, conditions),
+    inert: isFraction ? inertAmount(setting, fed, table) : 0,
+    lnK: lnK + lnBasisShift,
+  };
+  return { reaction, table, conditions, setting, fed, problem, lnBasisShift };
+}
+
+/** ln of the activity of a unit amount (or of the unit fraction) of a mixed species. */
+function lnScale({ medium, isFraction }: Setting, fed: Fed, conditions: Conditions): number {
+  const { basis, factor } = fed;
+  if (medium === 'as given' || medium === 'ideal liquid') return 0;
+  if (medium === 'gas' && isFraction) {
+    if (basis === 'pressure' || basis === 'concentration')
+      throw wrongBasis(fed, 'a gas at a pressure', 'mol or mol %');
+    return Math.log(pressureBar(conditions, 'a gas'));
+  }
+  if (medium === 'gas') {
+    if (basis === 'pressure') return Math.log(factor);
+    const RT = LITRE_BAR_PER_JOULE * GAS_CONSTANT * temperatureK(conditions, 'a gas in a volume');
+    if (basis === 'concentration') return Math.log(factor * RT);
+    if (basis === 'amount') return Math.log((factor * RT) / volumeL(conditions, 'a gas in a volume'));
+    throw wrongBasis(fed, 'a gas in a volume', 'mol, mol/L or bar');
+  }
+  if (basis === 'concentration') return Math.log(factor);
+  if (basis === 'amount') return Math.log(factor / volumeL(conditions, 'a solution with amounts in mol'));
+  throw wrongBasis(fed, 'a solution', 'mol/L, or mol with a volume row');
+}
+
+/** Inert species count where activities are fractions of all that is mixed. */
+function inertAmount({ medium }: Setting, { inert }: Fed, { amounts }: AmountsTable): number {
+  let sum = 0;
+  for (const { position, species, factor } of inert) {
+    if (countsInMedium(species(), medium)) sum += amounts[position]! * factor();
+  }
+  return sum;
+}
+
+/** K for amounts as given speaks of one unit; with several, only a reaction in which it cancels is clear. */
+function checkAsGiven({ medium, mixed, change }: Setting, { form, factors, reacting }: Fed): void {
+  if (medium !== 'as given' || change === 0) return;
+  const other = factors.findIndex((factor, i) => mixed[i] && factor !== 1);
+  if (other === -1) return;
+  const line = form.lines[reacting[other]!]!;
+  throw inputError('amounts-as-given', { place: linePlace(form, line), unit: unitText(line) });
+}
+
+/** A species named as inert must be fed and must not stand in the equation. */
+function checkInert(reaction: CheckedReaction, conditions: Conditions, { form, inert }: Fed): void {
+  for (const name of conditions.inert) {
+    if (inert.some(({ position }) => form.lines[position]!.species === name)) continue;
+    throw inputError('condition-inert', { name, equation: reaction.text });
+  }
+}
+
+function wrongBasis({ reference }: Fed, medium: string, wanted: string) {
+  return inputError('amounts-basis', { unit: reference?.text ?? 'no common unit', medium, wanted });
+}

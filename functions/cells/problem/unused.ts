@@ -1,0 +1,31 @@
+/**
+ * The condition rows that a calculation did not need. One table may serve many formulas, so that
+ * they are no error; the evidence lists them.
+ */
+import type { ConditionName } from '../reading/conditionRows.ts';
+import type { ExtentSetup } from './extentSetup.ts';
+
+/** Rows that state what the calculation goes by, whatever it is. */
+const ALWAYS_USED: readonly ConditionName[] = [
+  'medium',
+  'K in terms of',
+  'K written as',
+  'removal',
+  'activity model',
+  'gas model',
+];
+
+export function unusedConditions({ conditions: { rows }, setting, fed }: ExtentSetup): string[] {
+  const used = new Set<ConditionName>(ALWAYS_USED);
+  const { medium, change, isFraction } = setting;
+  const terms = rows.get('K in terms of')?.value;
+  if (change !== 0 && medium === 'gas') {
+    if (isFraction || terms === 'mole fraction') used.add('pressure');
+    if (terms === 'concentration' || (!isFraction && fed.basis !== 'pressure')) used.add('temperature');
+    if (!isFraction && fed.basis === 'amount') used.add('volume');
+  }
+  if (change !== 0 && medium === 'solution' && fed.basis === 'amount') used.add('volume');
+  if (used.has('pressure') && rows.get('pressure')?.unit?.quantity === 'gauge pressure')
+    used.add('barometer');
+  return [...rows.keys()].filter((name) => !used.has(name));
+}

@@ -1,0 +1,242 @@
+/**
+ * Registers the catalogue with a formula engine, the caller's own copy of HyperFormula.
+ *
+ * The engine's module and CommonJS builds do not know each other's classes, so nothing of the
+ * engine is imported here: the caller hands over the build that it uses. This is the only file
+ * of the functions that knows the engine.
+ */
+import type { CellError } from 'hyperformula';
+import type * as HyperFormulaModule from 'hyperformula';
+import { catalogue } from './catalogue.ts';
+import { answerShape, callFunction } from './cells/call.ts';
+import type { Answer, CellFunction, CellScalar, CellTable, CellValue, Shape } from './cells/entry.ts';
+import { InputError, inputError, isInputError } from './errors.ts';
+
+/** What is needed of the engine: its module, or an object with these members. */
+export type EngineModule = Pick<
+  typeof HyperFormulaModule,
+  | 'HyperFormula'
+  | 'FunctionPlugin'
+  | 'CellError'
+  | 'ErrorType'
+  | 'SimpleRangeValue'
+  | 'EmptyValue'
+  | 'ArraySize'
+>;
+
+/** The address of a cell as the engine counts it, from 0. */
+export interface CellPlace {
+  readonly sheet: number;
+  readonly row: number;
+  readonly col: number;
+}
+
+/**
+ * Hears of every call. A host that wants the evidence passes one as the engine's `context` option;
+ * `call` is the same object for the same place in the same formula.
+ */
+export interface CallRecorder {
+  readonly isCallRecorder: true;
+  answered(cell: CellPlace, call: object, functionName: string, answer: Answer): void;
+  failed(cell: CellPlace, call: object, error: InputError): void;
+}
+
+/** What has been registered with each engine module, so that registering again is harmless. */
+const registered = new WeakMap<object, Map<string, CellFunction>>();
+
+/**
+ * Makes every function of the catalogue, and the analyst's own, known to the engine. Call it before
+ * an engine is built; calling it again with the same functions changes nothing.
+ *
+ * `registerEvenkeel(await import('hyperformula'))`
+ *
+ * Errors: a name that the engine or the catalogue already has (`function-name-taken`).
+ */
+export function registerEvenkeel(engine: EngineModule, ownFunctions: readonly CellFunction[] = []): void {
+  const { HyperFormula } = engine;
+  const ours = registered.get(HyperFormula) ?? new Map<string, CellFunction>();
+  registered.set(HyperFormula, ours);
+  const entries = [...catalogue, ...ownFunctions];
+  const fresh = entries.filter((entry) => ours.get(entry.name) !== entry);
+  const taken = new Set(HyperFormula.getRegisteredFunctionNames(LANGUAGE));
+  for (const { name } of fresh) {
+    if (taken.has(name)) throw inputError('function-name-taken', { name });
+    taken.add(name);
+  }
+  if (fresh.length === 0) return;
+  const plugin = pluginClass(engine, fresh, new Map(entries.map((entry) => [entry.name, entry])));
+  const translations = Object.fromEntries(fresh.map(({ name }) => [name, name]));
+  HyperFormula.registerFunctionPlugin(plugin, { [LANGUAGE]: translations });
+  for (const entry of fresh) ours.set(entry.name, entry);
+}
+
+/** The engine's built-in language; without a translation of its name a function is unknown to it. */
+const LANGUAGE = 'enGB';
+
+/* The engine's own types for syntax nodes and interpreter state are not exported; these are the parts used. */
+interface SyntaxNode {
+  readonly type: string;
+  readonly procedureName?: string;
+  readonly args: readonly SyntaxNode[];
+}
+interface InterpreterState {
+  readonly formulaAddress: CellPlace;
+}
+interface EngineArraySize {
+  readonly width: number;
+  readonly height: number;
+}
+interface PluginInstance {
+  readonly config: { readonly context: unknown };
+  evaluateAst(node: SyntaxNode, state: InterpreterState): unknown;
+  arraySizeForAst(node: SyntaxNode, state: object): EngineArraySize;
+}
+
+function pluginClass(
+  engine: EngineModule,
+  entries: readonly CellFunction[],
+  byName: ReadonlyMap<string, CellFunction>,
+) {
+  const { ArraySize, FunctionPlugin } = engine;
+
+  class EvenkeelPlugin extends FunctionPlugin {
+    static override implementedFunctions = Object.fromEntries(
+      entries.map(({ name, shape }) => [
+        name,
+        {
+          method: name,
+          vectorizationForbidden: true,
+          enableArrayArithmeticForArguments: true,
+          ...(shape === undefined ? {} : { sizeOfResultArrayMethod: sizeMethod(name) }),
+        },
+      ]),
+    );
+  }
+
+  /** The size known from the syntax alone; a nested table function also tells how its table lies. */
+  const shapeOf = (plugin: PluginInstance, node: SyntaxNode, state: object): Shape | undefined => {
+    if (node.type === 'EMPTY') return undefined;
+    const entry = node.type === 'FUNCTION_CALL' ? byName.get(node.procedureName!) : undefined;
+    if (entry !== undefined)
+      return answerShape(
+        entry,
+        node.args.map((arg) => shapeOf(plugin, arg, state)),
+      );
+    const { width, height } = plugin.arraySizeForAst(node, { ...state, arraysFlag: true });
+    return { rows: height, columns: width };
+  };
+
+  for (const entry of entries) {
+    Object.defineProperties(EvenkeelPlugin.prototype, {
+      [entry.name]: {
+        value(this: PluginInstance, node: SyntaxNode, state: InterpreterState) {
+          return work(engine, this, entry, node, state, () => shapeOf(this, node, state) ?? ONE_CELL);
+        },
+      },
+      [sizeMethod(entry.name)]: {
+        value(this: PluginInstance, node: SyntaxNode, state: object) {
+          const { rows, columns } = shapeOf(this, node, state) ?? ONE_CELL;
+          return new ArraySize(columns, rows);
+        },
+      },
+    });
+  }
+  return EvenkeelPlugin;
+}
+
+const ONE_CELL: Shape = { rows: 1, columns: 1 };
+
+function sizeMethod(name: string): string {
+  return `size of ${name}`;
+}
+
+/** Works one call and tells the recorder. Nothing but the engine's own interruption leaves by an exception. */
+function work(
+  engine: EngineModule,
+  plugin: PluginInstance,
+  entry: CellFunction,
+  node: SyntaxNode,
+  state: InterpreterState,
+  declared: () => Shape,
+): unknown {
+  const recorder = recorderOf(plugin.config.context);
+  try {
+    const values: (CellValue | undefined)[] = [];
+    for (const argument of node.args) {
+      const value = readArgument(engine, plugin.evaluateAst(argument, state));
+      if (value instanceof engine.CellError) return value;
+      values.push(argument.type === 'EMPTY' ? undefined : value);
+    }
+    const answer = callFunction(entry, values);
+    const result = engineValue(engine, answer.value, declared);
+    recorder?.answered(state.formulaAddress, node, entry.name, answer);
+    return result;
+  } catch (thrown) {
+    const error = namedError(entry.name, thrown);
+    recorder?.failed(state.formulaAddress, node, error);
+    return new engine.CellError(engine.ErrorType.VALUE, error.message);
+  }
+}
+
+function recorderOf(context: unknown): CallRecorder | undefined {
+  const recorder = context as CallRecorder | undefined;
+  return recorder?.isCallRecorder === true ? recorder : undefined;
+}
+
+function namedError(functionName: string, thrown: unknown): InputError {
+  const error = isInputError(thrown)
+    ? thrown
+    : inputError('function-failed', { reason: thrown instanceof Error ? thrown.message : String(thrown) });
+  return new InputError(error.code, `${functionName}: ${error.message}`);
+}
+
+/**
+ * The value without the engine's own objects, or the first error in it: errors go on as they are, so
+ * that their origin shows. Rows that hold no such object are handed on uncopied.
+ */
+function readArgument(engine: EngineModule, value: unknown): CellValue | CellError {
+  if (value instanceof engine.CellError) return value;
+  if (!(value instanceof engine.SimpleRangeValue)) return cellScalar(engine, value);
+  const rows: readonly (readonly unknown[])[] = value.data;
+  let isPlain = true;
+  for (const row of rows) {
+    for (const cell of row) {
+      if (typeof cell !== 'object' && typeof cell !== 'symbol') continue;
+      if (cell instanceof engine.CellError) return cell;
+      isPlain = false;
+    }
+  }
+  const table = isPlain
+    ? (rows as CellTable)
+    : rows.map((row) => row.map((cell) => cellScalar(engine, cell)));
+  return table.length === 1 && table[0]!.length === 1 ? table[0]![0]! : table;
+}
+
+function cellScalar(engine: EngineModule, value: unknown): CellScalar {
+  if (value === engine.EmptyValue) return null;
+  // Dates, percentages and currencies come as objects that hold their number.
+  if (typeof value === 'object' && value !== null && 'val' in value) return value.val as number;
+  return value as CellScalar;
+}
+
+function engineValue(engine: EngineModule, value: CellValue, declared: () => Shape): unknown {
+  if (!Array.isArray(value)) return engineScalar(engine, value as CellScalar);
+  const rows = value as readonly (readonly CellScalar[])[];
+  const shape = declared();
+  if (rows.length !== shape.rows || rows[0]!.length !== shape.columns) {
+    throw inputError('table-lies-otherwise', {
+      found: `${rows.length} x ${rows[0]!.length}`,
+      expected: `${shape.rows} x ${shape.columns}`,
+    });
+  }
+  return engine.SimpleRangeValue.onlyValues(
+    rows.map((row) => row.map((cell) => engineScalar(engine, cell))) as never,
+  );
+}
+
+function engineScalar(engine: EngineModule, value: CellScalar): unknown {
+  if (typeof value === 'number' && !Number.isFinite(value)) {
+    throw new Error(`the answer ${value} is no finite number`);
+  }
+  return value === null ? engine.EmptyValue : value;
+}
