@@ -1,0 +1,39 @@
+/**
+ * An error cell of the engine as a code and a message of ours.
+ */
+import type { DetailedCellError } from 'hyperformula';
+import type { CellPlace } from '../../functions/plugin.ts';
+import type { ErrorValue } from '../evaluation.ts';
+import { type ServerErrorCode, serverError } from '../problems.ts';
+import type { Session } from './session.ts';
+
+/** Codes for the engine's own kinds of error, whose names are those of its `ErrorType`. */
+const CODES: Readonly<Record<string, ServerErrorCode>> = {
+  DIV_BY_ZERO: 'division-by-zero',
+  NAME: 'unknown-function',
+  VALUE: 'wrong-kind',
+  NUM: 'number-range',
+  NA: 'not-available',
+  CYCLE: 'cycle',
+  REF: 'reference-lost',
+  SPILL: 'array-blocked',
+  ERROR: 'formula-unparsed',
+};
+
+/**
+ * The error of a cell; `origin` is where it began, whose calls tell whether it is one of ours.
+ */
+export function errorValue(error: DetailedCellError, origin: CellPlace, session: Session): ErrorValue {
+  const own = session.errorAt(origin, error.message);
+  if (own !== undefined) return { error: own.code, message: own.message };
+  const code = CODES[error.type] ?? 'wrong-kind';
+  return { error: code, message: serverError(code as 'wrong-kind', { detail: detailOf(error) }).message };
+}
+
+/** What the engine says, without the names of its parser's own tokens. */
+function detailOf({ type, message, value }: DetailedCellError): string {
+  if (type !== 'ERROR') return message.replace(/\.$/, '') || value;
+  if (message.includes('RParen')) return 'a closing bracket is missing';
+  const surplus = /expecting EOF but found: (.+)/.exec(message);
+  return surplus === null ? 'something is missing or out of place' : `${surplus[1]} was not expected`;
+}

@@ -1,0 +1,108 @@
+/**
+ * Reads the cells of a built engine: values, errors with their origin, what a formula comes from.
+ */
+import { DetailedCellError, type HyperFormula, type SimpleCellRange } from 'hyperformula';
+import type { InputError } from '../../functions/errors.ts';
+import type { CellPlace } from '../../functions/plugin.ts';
+import type { Value } from '../evaluation.ts';
+import { type Area, readReference, referenceName } from '../workbook/address.ts';
+import { errorValue } from './cellErrors.ts';
+import type { Session } from './session.ts';
+
+export class Cells {
+  readonly #engine: HyperFormula;
+  readonly #session: Session;
+  readonly #refused: ReadonlyMap<string, InputError>;
+
+  constructor(engine: HyperFormula, session: Session, refused: ReadonlyMap<string, InputError>) {
+    this.#engine = engine;
+    this.#session = session;
+    this.#refused = refused;
+  }
+
+  /** The place of an address such as `Kettle!B4`; its sheet must exist. */
+  place(address: string): CellPlace {
+    const { sheet, firstRow: row, firstColumn: col } = readReference(address)!;
+    return { sheet: this.#engine.getSheetId(sheet)!, row, col };
+  }
+
+  /** `Kettle!B4`, or `Kettle!B4:C7` for more than one cell. */
+  address(sheet: number, area: Area): string {
+    return referenceName({ sheet: this.#engine.getSheetName(sheet)!, ...area });
+  }
+
+  addressOf({ sheet, row, col }: CellPlace): string {
+    return this.address(sheet, { firstRow: row, firstColumn: col, lastRow: row, lastColumn: col });
+  }
+
+  value(place: CellPlace): Value {
+    const value = this.#engine.getCellValue(place);
+    if (!(value instanceof DetailedCellError)) return value;
+    const origin = this.origin(place);
+    const refused = this.#refused.get(this.addressOf(origin));
+    if (refused !== undefined) return { error: refused.code, message: refused.message };
+    return errorValue(value, origin, this.#session);
+  }
+
+  /** Every value of a cell (one value) or a range (rows of values). */
+  values(address: string): Value | Value[][] {
+    const { firstRow, firstColumn, lastRow, lastColumn } = readReference(address)!;
+    const place = this.place(address);
+    if (firstRow === lastRow && firstColumn === lastColumn) return this.value(place);
+    const rows: Value[][] = [];
+    for (let row = firstRow; row <= lastRow; row++) {
+      const cells: Value[] = [];
+      for (let col = firstColumn; col <= lastColumn; col++) cells.push(this.value({ ...place, row, col }));
+      rows.push(cells);
+    }
+    return rows;
+  }
+
+  /** The cell where the error of this cell began; itself where the error is its own. */
+  origin(place: CellPlace): CellPlace {
+    const error = this.#engine.getCellValue(place);
+    if (!(error instanceof DetailedCellError) || error.address === undefined) return place;
+    const told = this.place(error.address);
+    // Errors of the engine's parser carry no address, so that the first cell to read one is told instead.
+    return this.#firstUnplacedError(told) ?? told;
+  }
+
+  #firstUnplacedError(place: CellPlace): CellPlace | undefined {
+    for (const cell of this.#cellsRead(place)) {
+      const error = this.#engine.getCellValue(cell);
+      if (error instanceof DetailedCellError && error.address === undefined) return cell;
+    }
+    return undefined;
+  }
+
+  /** The cells and ranges that a formula reads, as addresses, in the order of the engine. */
+  comesFrom(place: CellPlace): string[] {
+    return this.#precedents(place).map((read) => {
+      if (!('start' in read)) return this.addressOf(read);
+      const { start, end } = read;
+      return this.address(start.sheet, {
+        firstRow: start.row,
+        firstColumn: start.col,
+        lastRow: end.row,
+        lastColumn: end.col,
+      });
+    });
+  }
+
+  *#cellsRead(place: CellPlace): Generator<CellPlace> {
+    for (const read of this.#precedents(place)) {
+      if (!('start' in read)) yield read;
+      else yield* cellsOf(read);
+    }
+  }
+
+  #precedents(place: CellPlace): (CellPlace | SimpleCellRange)[] {
+    return this.#engine.getCellPrecedents(place);
+  }
+}
+
+function* cellsOf({ start, end }: SimpleCellRange): Generator<CellPlace> {
+  for (let row = start.row; row <= end.row; row++) {
+    for (let col = start.col; col <= end.col; col++) yield { sheet: start.sheet, row, col };
+  }
+}
