@@ -5,41 +5,15 @@
  * engine is imported here: the caller hands over the build that it uses. This is the only file
  * of the functions that knows the engine.
  */
-import type { CellError } from 'hyperformula';
-import type * as HyperFormulaModule from 'hyperformula';
 import { catalogue } from './catalogue.ts';
 import { answerShape, callFunction } from './cells/call.ts';
-import type { Answer, CellFunction, CellScalar, CellTable, CellValue, Shape } from './cells/entry.ts';
+import type { CellFunction, CellValue, Shape } from './cells/entry.ts';
 import { InputError, inputError, isInputError } from './errors.ts';
+import { type CellPlace, recorderOf } from './plugin/recorder.ts';
+import { type EngineModule, engineValue, readArgument } from './plugin/values.ts';
 
-/** What is needed of the engine: its module, or an object with these members. */
-export type EngineModule = Pick<
-  typeof HyperFormulaModule,
-  | 'HyperFormula'
-  | 'FunctionPlugin'
-  | 'CellError'
-  | 'ErrorType'
-  | 'SimpleRangeValue'
-  | 'EmptyValue'
-  | 'ArraySize'
->;
-
-/** The address of a cell as the engine counts it, from 0. */
-export interface CellPlace {
-  readonly sheet: number;
-  readonly row: number;
-  readonly col: number;
-}
-
-/**
- * Hears of every call. A host that wants the evidence passes one as the engine's `context` option;
- * `call` is the same object for the same place in the same formula.
- */
-export interface CallRecorder {
-  readonly isCallRecorder: true;
-  answered(cell: CellPlace, call: object, functionName: string, answer: Answer): void;
-  failed(cell: CellPlace, call: object, error: InputError): void;
-}
+export type { CallRecorder, CellPlace } from './plugin/recorder.ts';
+export type { EngineModule } from './plugin/values.ts';
 
 /** What has been registered with each engine module, so that registering again is harmless. */
 const registered = new WeakMap<object, Map<string, CellFunction>>();
@@ -101,13 +75,13 @@ function pluginClass(
 
   class EvenkeelPlugin extends FunctionPlugin {
     static override implementedFunctions = Object.fromEntries(
-      entries.map(({ name, shape }) => [
-        name,
+      entries.map((entry) => [
+        entry.name,
         {
-          method: name,
+          method: entry.name,
           vectorizationForbidden: true,
           enableArrayArithmeticForArguments: true,
-          ...(shape === undefined ? {} : { sizeOfResultArrayMethod: sizeMethod(name) }),
+          ...(entry.shape && { sizeOfResultArrayMethod: sizeMethod(entry.name) }),
         },
       ]),
     );
@@ -117,11 +91,10 @@ function pluginClass(
   const shapeOf = (plugin: PluginInstance, node: SyntaxNode, state: object): Shape | undefined => {
     if (node.type === 'EMPTY') return undefined;
     const entry = node.type === 'FUNCTION_CALL' ? byName.get(node.procedureName!) : undefined;
-    if (entry !== undefined)
-      return answerShape(
-        entry,
-        node.args.map((arg) => shapeOf(plugin, arg, state)),
-      );
+    if (entry !== undefined) {
+      const shapes = node.args.map((argument) => shapeOf(plugin, argument, state));
+      return answerShape(entry, shapes);
+    }
     const { width, height } = plugin.arraySizeForAst(node, { ...state, arraysFlag: true });
     return { rows: height, columns: width };
   };
@@ -164,7 +137,10 @@ function work(
     const values: (CellValue | undefined)[] = [];
     for (const argument of node.args) {
       const value = readArgument(engine, plugin.evaluateAst(argument, state));
-      if (value instanceof engine.CellError) return value;
+      if (value instanceof engine.CellError) {
+        recorder?.passedOn(state.formulaAddress, node);
+        return value;
+      }
       values.push(argument.type === 'EMPTY' ? undefined : value);
     }
     const answer = callFunction(entry, values);
@@ -178,65 +154,9 @@ function work(
   }
 }
 
-function recorderOf(context: unknown): CallRecorder | undefined {
-  const recorder = context as CallRecorder | undefined;
-  return recorder?.isCallRecorder === true ? recorder : undefined;
-}
-
 function namedError(functionName: string, thrown: unknown): InputError {
   const error = isInputError(thrown)
     ? thrown
     : inputError('function-failed', { reason: thrown instanceof Error ? thrown.message : String(thrown) });
   return new InputError(error.code, `${functionName}: ${error.message}`);
-}
-
-/**
- * The value without the engine's own objects, or the first error in it: errors go on as they are, so
- * that their origin shows. Rows that hold no such object are handed on uncopied.
- */
-function readArgument(engine: EngineModule, value: unknown): CellValue | CellError {
-  if (value instanceof engine.CellError) return value;
-  if (!(value instanceof engine.SimpleRangeValue)) return cellScalar(engine, value);
-  const rows: readonly (readonly unknown[])[] = value.data;
-  let isPlain = true;
-  for (const row of rows) {
-    for (const cell of row) {
-      if (typeof cell !== 'object' && typeof cell !== 'symbol') continue;
-      if (cell instanceof engine.CellError) return cell;
-      isPlain = false;
-    }
-  }
-  const table = isPlain
-    ? (rows as CellTable)
-    : rows.map((row) => row.map((cell) => cellScalar(engine, cell)));
-  return table.length === 1 && table[0]!.length === 1 ? table[0]![0]! : table;
-}
-
-function cellScalar(engine: EngineModule, value: unknown): CellScalar {
-  if (value === engine.EmptyValue) return null;
-  // Dates, percentages and currencies come as objects that hold their number.
-  if (typeof value === 'object' && value !== null && 'val' in value) return value.val as number;
-  return value as CellScalar;
-}
-
-function engineValue(engine: EngineModule, value: CellValue, declared: () => Shape): unknown {
-  if (!Array.isArray(value)) return engineScalar(engine, value as CellScalar);
-  const rows = value as readonly (readonly CellScalar[])[];
-  const shape = declared();
-  if (rows.length !== shape.rows || rows[0]!.length !== shape.columns) {
-    throw inputError('table-lies-otherwise', {
-      found: `${rows.length} x ${rows[0]!.length}`,
-      expected: `${shape.rows} x ${shape.columns}`,
-    });
-  }
-  return engine.SimpleRangeValue.onlyValues(
-    rows.map((row) => row.map((cell) => engineScalar(engine, cell))) as never,
-  );
-}
-
-function engineScalar(engine: EngineModule, value: CellScalar): unknown {
-  if (typeof value === 'number' && !Number.isFinite(value)) {
-    throw new Error(`the answer ${value} is no finite number`);
-  }
-  return value === null ? engine.EmptyValue : value;
 }

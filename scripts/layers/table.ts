@@ -15,7 +15,8 @@ const ENGINE = 'hyperformula';
 /** The lowest first: a layer stands only on those above it in this list. */
 export const LAYERS: readonly Layer[] = [
   layer('error table', 'functions/errorTable.ts', []),
-  layer('errors', 'functions/errors.ts', ['error table']),
+  layer('error tables', 'functions/errorTables/', ['error table']),
+  layer('errors', 'functions/errors.ts', ['error tables']),
   layer('numerics', 'functions/numerics/', ['errors']),
   layer('data', 'functions/data/', ['errors']),
   layer('chemistry', 'functions/chemistry/', ['numerics', 'data'], ['mathjs']),
@@ -23,7 +24,8 @@ export const LAYERS: readonly Layer[] = [
   layer('cells', 'functions/cells/', ['equilibrium'], ['mathjs']),
   layer('library', 'functions/index.ts', ['cells']),
   layer('catalogue', 'functions/catalogue.ts', ['cells']),
-  layer('plugin', 'functions/plugin.ts', ['catalogue'], [ENGINE]),
+  layer('engine values', 'functions/plugin/', ['cells'], [ENGINE]),
+  layer('plugin', 'functions/plugin.ts', ['catalogue', 'engine values']),
 
   layer('problem tables', 'server/problemTables/', ['error table']),
   layer('problems', 'server/problems.ts', ['errors', 'problem tables']),

@@ -40,6 +40,8 @@ export const compositionAtEquilibrium = defineFunction({
     const value = alignedWith(given.amounts.form, 'at equilibrium', (position) =>
       amountInLine(setup, outcome.amounts, position),
     );
-    return { value, outcome };
+    const { unitText } = setup.fed;
+    const isOneUnit = given.amounts.form.lines.every(({ unit }) => unit?.text === unitText);
+    return { value, unit: isOneUnit ? unitText : null, outcome };
   },
 });

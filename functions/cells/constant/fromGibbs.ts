@@ -3,11 +3,10 @@ import { inputError } from '../../errors.ts';
 import { defineFunction } from '../entry.ts';
 import { TEMPERATURE_UNIT } from '../parameters/common.ts';
 import { number } from '../parameters/number.ts';
+import { isHoldable } from '../problem/holdable.ts';
 import { kelvin } from '../problem/kelvin.ts';
 
 const JOULE_PER_KILOJOULE = 1000;
-/** exp() of more than this exceeds what a cell can hold. */
-const LARGEST_LOGARITHM = 709;
 
 export const kFromGibbs = defineFunction({
   name: 'K.FROM.GIBBS',
@@ -30,8 +29,7 @@ export const kFromGibbs = defineFunction({
   run({ 'reaction Gibbs energy': gibbs, temperature, unit }) {
     const T = kelvin(temperature, unit, 'temperature');
     const lnK = (-gibbs * JOULE_PER_KILOJOULE) / (GAS_CONSTANT * T);
-    if (Math.abs(lnK) > LARGEST_LOGARITHM)
-      throw inputError('constant-too-large', { lnK: lnK.toPrecision(6) });
+    if (!isHoldable(lnK)) throw inputError('constant-too-large', { lnK: lnK.toPrecision(6) });
     return { value: Math.exp(lnK) };
   },
 });

@@ -5,12 +5,10 @@ import { CONDITIONS, EQUATION } from '../parameters/common.ts';
 import { positiveNumber } from '../parameters/number.ts';
 import { text } from '../parameters/text.ts';
 import { lnReference } from '../problem/constant.ts';
+import { isHoldable } from '../problem/holdable.ts';
 import { constantSetting } from '../problem/medium.ts';
 import { CONDITION_RULES } from '../reading/conditionRows.ts';
 import { type Condition, type Conditions, NO_CONDITIONS } from '../reading/conditions.ts';
-
-/** Constants beyond exp(709) cannot be held in a cell. */
-const LARGEST_LOGARITHM = 709;
 
 export const kRestate = defineFunction({
   name: 'K.RESTATE',
@@ -39,8 +37,7 @@ export const kRestate = defineFunction({
     const inTerms = (words: string, argument: string): number =>
       setting.change * lnReference(setting, withTerms(conditions, words, argument), null);
     const lnK = Math.log(K) + inTerms(from, 'from') - inTerms(to, 'to');
-    if (Math.abs(lnK) > LARGEST_LOGARITHM)
-      throw inputError('constant-too-large', { lnK: lnK.toPrecision(6) });
+    if (!isHoldable(lnK)) throw inputError('constant-too-large', { lnK: lnK.toPrecision(6) });
     return { value: Math.exp(lnK) };
   },
 });

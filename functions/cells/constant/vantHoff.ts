@@ -1,8 +1,10 @@
 import { GAS_CONSTANT } from '../../data/constants.ts';
+import { inputError } from '../../errors.ts';
 import { defineFunction } from '../entry.ts';
 import { TEMPERATURE_UNIT } from '../parameters/common.ts';
 import { number, positiveNumber } from '../parameters/number.ts';
 import { optional } from '../parameters/optional.ts';
+import { isHoldable } from '../problem/holdable.ts';
 import { kelvin } from '../problem/kelvin.ts';
 
 const JOULE_PER_KILOJOULE = 1000;
@@ -45,6 +47,10 @@ export const kVantHoff = defineFunction({
     const byEnthalpy =
       ((enthalpy * JOULE_PER_KILOJOULE) / GAS_CONSTANT) * ((second - first) / (first * second));
     const byHeatCapacity = (heatCapacity / GAS_CONSTANT) * (first / second - 1 - Math.log(first / second));
-    return { value: K * Math.exp(byEnthalpy + byHeatCapacity) };
+    const change = byEnthalpy + byHeatCapacity;
+    const lnK = Math.log(K) + change;
+    if (!isHoldable(change) || !isHoldable(lnK))
+      throw inputError('constant-too-large', { lnK: lnK.toPrecision(6) });
+    return { value: K * Math.exp(change) };
   },
 });

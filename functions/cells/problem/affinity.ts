@@ -52,11 +52,11 @@ function amountContributions({ problem, fed, setting, table }: ExtentSetup): num
   const total = feed.reduce((sum, n, i) => (mixed[i] ? sum + n : sum), inert);
   const byTotal = isFraction ? change / total : 0;
   const reacting = fed.reacting.flatMap((position, i) => {
-    const u = table.uncertainties[position]!;
+    const u = table.uncertainties[position] ?? null;
     return u === null || !mixed[i] ? [] : (stoichiometry[i]! / feed[i]! - byTotal) * u * fed.factors[i]!;
   });
   const others = fed.inert.flatMap(({ position, factor }) => {
-    const u = table.uncertainties[position]!;
+    const u = table.uncertainties[position] ?? null;
     return u === null || byTotal === 0 ? [] : byTotal * u * factor();
   });
   return [...reacting, ...others];

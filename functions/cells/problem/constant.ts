@@ -39,7 +39,7 @@ export function statedLnK(K: number, conditions: Conditions = NO_CONDITIONS): nu
  * temperature or a pressure row that is not there).
  */
 export function lnReference(
-  { medium, change }: Setting,
+  { medium, change, isFraction }: Setting,
   conditions: Conditions,
   amountsUnit: Unit | null,
 ): number {
@@ -51,7 +51,7 @@ export function lnReference(
   if (change === 0) return 0;
   if (medium === 'as given') {
     if (terms === 'activity' && unit === null) return 0;
-    if (unit === null || amountsUnit === null || unit.quantity !== amountsUnit.quantity) {
+    if (unit === null || unit.quantity !== amountsUnit?.quantity) {
       throw refuse('the amounts are taken as they are given, in another unit or none');
     }
     return Math.log(unit.factor / amountsUnit.factor);
@@ -62,7 +62,10 @@ export function lnReference(
   if (terms === 'mole fraction' && unit !== null) throw refuse('a mole fraction has no unit');
   switch (medium) {
     case 'gas':
-      if (terms === 'mole fraction') return Math.log(pressureBar(conditions, 'K in terms of mole fraction'));
+      if (terms === 'mole fraction') {
+        if (!isFraction) throw refuse('in a volume the pressure changes as the reaction runs');
+        return Math.log(pressureBar(conditions, 'K in terms of mole fraction'));
+      }
       if (unit!.quantity === 'pressure' && terms !== 'concentration') return Math.log(unit!.factor);
       if (unit!.quantity === 'concentration' && terms === 'concentration') {
         return Math.log(

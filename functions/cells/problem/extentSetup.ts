@@ -2,6 +2,7 @@
  * From the words of a sheet to a problem for the one-reaction solver, and back to the units of the sheet.
  */
 import type { CheckedReaction } from '../../chemistry/balancedEquation.ts';
+import { matchSpecies } from '../../chemistry/match.ts';
 import { GAS_CONSTANT } from '../../data/constants.ts';
 import type { ExtentProblem } from '../../equilibrium/extentProblem.ts';
 import { inputError } from '../../errors.ts';
@@ -99,6 +100,7 @@ function checkAsGiven({ medium, mixed, change }: Setting, { form, factors, react
 function checkInert(reaction: CheckedReaction, conditions: Conditions, { form, inert }: Fed): void {
   for (const name of conditions.inert) {
     if (inert.some(({ position }) => form.lines[position]!.species === name)) continue;
+    if (matchSpecies({ species: inert.map(({ species }) => species()) }, name) !== null) continue;
     throw inputError('condition-inert', { name, equation: reaction.text });
   }
 }

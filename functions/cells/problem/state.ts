@@ -8,6 +8,9 @@ import { type Conditions, measured } from '../reading/conditions.ts';
 /** 1 J is 0.01 L bar, exactly. */
 export const LITRE_BAR_PER_JOULE = 0.01;
 
+/** In kelvin, bar or litres; nothing on earth is larger, and no product of it overflows. */
+const LARGEST_CONDITION = 1e15;
+
 /** Temperature in kelvin. Errors: `condition-missing`, `condition-range`. */
 export function temperatureK(conditions: Conditions, purpose: string): number {
   return positive('temperature', measured(conditions, 'temperature', readUnit('K')), purpose);
@@ -37,6 +40,6 @@ export function volumeL(conditions: Conditions, purpose: string): number {
 
 function positive(name: string, value: number | undefined, purpose: string): number {
   if (value === undefined) throw inputError('condition-missing', { name, purpose });
-  if (!(value > 0)) throw inputError('condition-range', { name, value });
+  if (!(value > 0 && value <= LARGEST_CONDITION)) throw inputError('condition-range', { name, value });
   return value;
 }

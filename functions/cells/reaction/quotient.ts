@@ -3,6 +3,7 @@ import { inputError } from '../../errors.ts';
 import { defineFunction } from '../entry.ts';
 import { AMOUNTS, CONDITIONS, EQUATION } from '../parameters/common.ts';
 import { extentSetup } from '../problem/extentSetup.ts';
+import { isHoldable } from '../problem/holdable.ts';
 
 export const reactionQuotientOf = defineFunction({
   name: 'REACTION.QUOTIENT',
@@ -36,7 +37,11 @@ export const reactionQuotientOf = defineFunction({
   run({ equation, amounts, conditions }) {
     const { problem, lnBasisShift } = extentSetup(equation, 0, amounts, conditions);
     const { lnQ, absentReactants, absentProducts } = reactionQuotient(problem);
-    if (lnQ !== null) return { value: Math.exp(lnQ - lnBasisShift) };
+    if (lnQ !== null) {
+      const lnStated = lnQ - lnBasisShift;
+      if (isHoldable(lnStated)) return { value: Math.exp(lnStated) };
+      throw inputError('quotient-too-large', { lnQ: lnStated.toPrecision(6) });
+    }
     if (absentReactants.length === 0) return { value: 0 };
     throw inputError('quotient-undefined', {
       absent: absentReactants.map((i) => problem.species[i]).join(', '),

@@ -4,7 +4,7 @@
  * Everything that a row can get wrong is an error here, so that nobody after this needs to check it
  * again. Whether a row is needed is for the calculation to say.
  */
-import { convertDifference, convertValue } from '../../chemistry/units/convert.ts';
+import { convertDifference, convertValue, toBase } from '../../chemistry/units/convert.ts';
 import { readUnit } from '../../chemistry/units/readUnit.ts';
 import type { Unit } from '../../chemistry/units/unit.ts';
 import { at, inputError } from '../../errors.ts';
@@ -84,6 +84,7 @@ function readRow(name: ConditionName, line: readonly CellScalar[], place: string
   const rule: ConditionRule = CONDITION_RULES[name];
   const value = readValue(rule, line[1]!, place);
   const unit = readConditionUnit(rule, line[2] ?? null, place);
+  refuseImpossible(rule, value, unit, place);
   if (line[3] === undefined || line[3] === null || line[3] === '')
     return { row, value, unit, uncertainty: null };
   return { row, value, unit, uncertainty: readUncertainty(rule, line[3], place) };
@@ -108,6 +109,20 @@ function readValue(rule: ConditionRule, cell: CellScalar, place: string): number
       throw inputError('condition-value', { place, given: describe(cell), wanted });
     }
   }
+}
+
+/** Nothing is colder than absolute zero, and no pressure, volume or uncertainty is less than nothing. */
+function refuseImpossible(
+  rule: ConditionRule,
+  value: number | string,
+  unit: Unit | null,
+  place: string,
+): void {
+  if (typeof value !== 'number' || unit?.quantity === 'gauge pressure') return;
+  const isPossible = unit === null ? value >= 0 : toBase(value, unit) > 0;
+  if (isPossible) return;
+  const wanted = rule.holds === 'number' ? `a ${rule.quantities[0]} above nothing` : 'a number of 0 or more';
+  throw inputError('condition-value', { place, given: `${value} ${unit?.text ?? ''}`.trimEnd(), wanted });
 }
 
 function readConditionUnit(rule: ConditionRule, cell: CellScalar, place: string): Unit | null {

@@ -54,8 +54,7 @@ export function linePlace(
  */
 export function labelledForm(lines: readonly Line[], lies: 'down' | 'across'): TableForm {
   let key: string = lies;
-  for (let i = 0; i < lines.length; i++) {
-    const line = lines[i]!;
+  for (const line of lines) {
     key += `\n${wordOf(line[0])}\t${wordOf(line[2])}`;
   }
   const heading = lines[0]![3];

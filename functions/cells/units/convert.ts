@@ -1,7 +1,9 @@
 import { convertValue } from '../../chemistry/units/convert.ts';
 import { readUnit } from '../../chemistry/units/readUnit.ts';
-import { at } from '../../errors.ts';
+import type { Unit } from '../../chemistry/units/unit.ts';
+import { at, inputError } from '../../errors.ts';
 import { defineFunction } from '../entry.ts';
+import { describe } from '../parameters/describe.ts';
 import { number } from '../parameters/number.ts';
 import { text } from '../parameters/text.ts';
 
@@ -31,20 +33,20 @@ export const unitsConvert = defineFunction({
     { formula: '=UNITS.CONVERT(1, "kg", "bar")', gives: { error: 'unit-incompatible' }, source: 'by hand' },
   ],
   run({ value, from, to }) {
-    const unit = at(
-      () => 'to',
-      () => readUnit(to),
-    );
-    return {
-      value: convertValue(
-        value,
-        at(
-          () => 'from',
-          () => readUnit(from),
-        ),
-        unit,
-      ),
-      unit: unit.text,
-    };
+    const wanted = unitOf(to, 'to');
+    const converted = convertValue(value, unitOf(from, 'from'), wanted);
+    if (Number.isFinite(converted)) return { value: converted, unit: wanted.text };
+    throw inputError('argument-kind', {
+      argument: 'value',
+      given: describe(value),
+      wanted: `a number that a cell can hold in ${wanted.text}`,
+    });
   },
 });
+
+function unitOf(written: string, argument: string): Unit {
+  return at(
+    () => argument,
+    () => readUnit(written),
+  );
+}

@@ -21,7 +21,7 @@ export function convertValue(value: number, from: Unit, to: Unit): number {
 /** A difference or standard uncertainty in another unit: 2 degC of uncertainty is 2 K. */
 export function convertDifference(difference: number, from: Unit, to: Unit): number {
   if (from.text === to.text) return difference;
-  refuseIncompatible(from, to);
+  refuseIncompatible(from, to, SAME_DIFFERENCE);
   return scale(difference, from, to);
 }
 
@@ -30,8 +30,8 @@ function scale(value: number, from: Unit, to: Unit): number {
   return (value * (from.numerator * to.denominator)) / (from.denominator * to.numerator);
 }
 
-function refuseIncompatible(from: Unit, to: Unit): void {
-  if (measuredAs(from) === measuredAs(to)) return;
+function refuseIncompatible(from: Unit, to: Unit, same = SAME_BASE): void {
+  if (measuredAs(from, same) === measuredAs(to, same)) return;
   throw inputError('unit-incompatible', {
     from: from.text,
     fromQuantity: describe(from),
@@ -45,9 +45,12 @@ const SAME_BASE: Partial<Record<Quantity, Quantity>> = {
   'gas volume flow': 'amount flow',
 };
 
+/** The barometer drops out of a difference. */
+const SAME_DIFFERENCE: typeof SAME_BASE = { ...SAME_BASE, 'gauge pressure': 'pressure' };
+
 /** Units convert into each other when this is the same. */
-function measuredAs({ quantity, dimensions, as }: Unit): string {
-  return `${SAME_BASE[quantity] ?? quantity} ${dimensions} ${as?.name ?? ''}`;
+function measuredAs({ quantity, dimensions, as }: Unit, same: typeof SAME_BASE): string {
+  return `${same[quantity] ?? quantity} ${dimensions} ${as?.name ?? ''}`;
 }
 
 function describe({ quantity, as }: Unit): string {
