@@ -1,7 +1,7 @@
 /**
  * An error cell of the engine as a code and a message of ours.
  */
-import type { DetailedCellError } from 'hyperformula';
+import { type DetailedCellError, ErrorType } from 'hyperformula';
 import type { CellPlace } from '../../functions/plugin.ts';
 import type { ErrorValue } from '../evaluation.ts';
 import { type ServerErrorCode, serverError } from '../problems.ts';
@@ -32,7 +32,7 @@ export function errorValue(error: DetailedCellError, origin: CellPlace, session:
 
 /** What the engine says, without the names of its parser's own tokens. */
 function detailOf({ type, message, value }: DetailedCellError): string {
-  if (type !== 'ERROR') return message.replace(/\.$/, '') || value;
+  if (type !== ErrorType.ERROR) return message.replace(/\.$/, '') || value;
   if (message.includes('RParen')) return 'a closing bracket is missing';
   const surplus = /expecting EOF but found: (.+)/.exec(message);
   return surplus === null ? 'something is missing or out of place' : `${surplus[1]} was not expected`;

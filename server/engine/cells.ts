@@ -1,7 +1,7 @@
 /**
  * Reads the cells of a built engine: values, errors with their origin, what a formula comes from.
  */
-import { DetailedCellError, type HyperFormula, type SimpleCellRange } from 'hyperformula';
+import { type CellValue, DetailedCellError, type HyperFormula } from 'hyperformula';
 import type { InputError } from '../../functions/errors.ts';
 import type { CellPlace } from '../../functions/plugin.ts';
 import type { Value } from '../evaluation.ts';
@@ -36,7 +36,11 @@ export class Cells {
   }
 
   value(place: CellPlace): Value {
-    const value = this.#engine.getCellValue(place);
+    return this.readValue(this.#engine.getCellValue(place), place);
+  }
+
+  /** A value of the engine's at this place, an error with its code and message. */
+  readValue(value: CellValue, place: CellPlace): Value {
     if (!(value instanceof DetailedCellError)) return value;
     const origin = this.origin(place);
     const refused = this.#refused.get(this.addressOf(origin));
@@ -77,32 +81,29 @@ export class Cells {
 
   /** The cells and ranges that a formula reads, as addresses, in the order of the engine. */
   comesFrom(place: CellPlace): string[] {
-    return this.#precedents(place).map((read) => {
-      if (!('start' in read)) return this.addressOf(read);
-      const { start, end } = read;
-      return this.address(start.sheet, {
-        firstRow: start.row,
-        firstColumn: start.col,
-        lastRow: end.row,
-        lastColumn: end.col,
-      });
-    });
+    return this.#areasRead(place).map(({ sheet, ...area }) => this.address(sheet, area));
   }
 
   *#cellsRead(place: CellPlace): Generator<CellPlace> {
-    for (const read of this.#precedents(place)) {
-      if (!('start' in read)) yield read;
-      else yield* cellsOf(read);
+    for (const { sheet, firstRow, lastRow, firstColumn, lastColumn } of this.#areasRead(place)) {
+      for (let row = firstRow; row <= lastRow; row++) {
+        for (let col = firstColumn; col <= lastColumn; col++) yield { sheet, row, col };
+      }
     }
   }
 
-  #precedents(place: CellPlace): (CellPlace | SimpleCellRange)[] {
-    return this.#engine.getCellPrecedents(place);
-  }
-}
-
-function* cellsOf({ start, end }: SimpleCellRange): Generator<CellPlace> {
-  for (let row = start.row; row <= end.row; row++) {
-    for (let col = start.col; col <= end.col; col++) yield { sheet: start.sheet, row, col };
+  /** A range over whole columns or rows ends where its sheet does; the engine lets it end at infinity. */
+  #areasRead(place: CellPlace): (Area & { readonly sheet: number })[] {
+    return this.#engine.getCellPrecedents(place).map((read) => {
+      const { start, end } = 'start' in read ? read : { start: read, end: read };
+      const { width, height } = this.#engine.getSheetDimensions(start.sheet);
+      return {
+        sheet: start.sheet,
+        firstRow: start.row,
+        firstColumn: start.col,
+        lastRow: Number.isFinite(end.row) ? end.row : Math.max(start.row, height - 1),
+        lastColumn: Number.isFinite(end.col) ? end.col : Math.max(start.col, width - 1),
+      };
+    });
   }
 }

@@ -104,7 +104,7 @@ export class Host {
       outputs: this.outputs(),
       sheets,
       formulas: this.#formulas(),
-      problems: this.#problems(),
+      problems: this.#problems(sheets),
       // Checks change the inputs: nothing may be read after them.
       checks: this.#checks(),
       instant: this.#session.instantRead,
@@ -125,9 +125,12 @@ export class Host {
     return Object.fromEntries(
       this.#workbook.sheets.map(({ name }) => {
         const sheet = engine.getSheetId(name)!;
-        const { width, height } = engine.getSheetDimensions(sheet);
+        const values = engine.getSheetValues(sheet);
+        const { width, height } = usedSize(values);
         const rows = Array.from({ length: height }, (_, row) =>
-          Array.from({ length: width }, (_, col) => this.#cells.value({ sheet, row, col })),
+          Array.from({ length: width }, (__, col) =>
+            this.#cells.readValue(values[row]![col] ?? null, { sheet, row, col }),
+          ),
         );
         return [name, rows];
       }),
@@ -161,18 +164,16 @@ export class Host {
   }
 
   /** The cells where an error begins; those that only pass it on are left out. */
-  #problems(): Problem[] {
+  #problems(sheets: Readonly<Record<string, Value[][]>>): Problem[] {
     const problems: Problem[] = [];
-    for (const { name, rows } of this.#workbook.sheets) {
+    for (const [name, rows] of Object.entries(sheets)) {
       const sheet = this.#built.engine.getSheetId(name)!;
       rows.forEach((cells, row) =>
-        cells.forEach((_, col) => {
-          const place = { sheet, row, col };
-          const value = this.#cells.value(place);
+        cells.forEach((value, col) => {
           if (!isError(value)) return;
-          const origin = this.#cells.origin(place);
-          if (origin.sheet !== sheet || origin.row !== row || origin.col !== col) return;
-          problems.push({ cell: this.#cells.addressOf(place), code: value.error, message: value.message });
+          const cell = this.#cells.addressOf({ sheet, row, col });
+          if (this.#cells.addressOf(this.#cells.origin({ sheet, row, col })) !== cell) return;
+          problems.push({ cell, code: value.error, message: value.message });
         }),
       );
     }
@@ -191,4 +192,18 @@ export class Host {
     if (results.length > 0) this.set(given);
     return results;
   }
+}
+
+/** The rows and columns up to the last value; a cell that is only referred to makes the engine's sheet larger. */
+function usedSize(values: readonly (readonly unknown[])[]): { width: number; height: number } {
+  let width = 0;
+  let height = 0;
+  values.forEach((cells, row) =>
+    cells.forEach((value, col) => {
+      if (value === null || value === undefined) return;
+      width = Math.max(width, col + 1);
+      height = row + 1;
+    }),
+  );
+  return { width, height };
 }

@@ -42,6 +42,10 @@ export class Session implements CallRecorder {
     this.#record(cell, call, { error });
   }
 
+  passedOn(cell: CellPlace, call: object): void {
+    this.#calls.get(keyOf(cell))?.delete(call);
+  }
+
   /** The calls in a cell that gave an answer, in the order in which they were first worked. */
   answersAt(cell: CellPlace): FunctionAnswer[] {
     const answers: FunctionAnswer[] = [];

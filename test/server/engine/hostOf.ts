@@ -22,7 +22,9 @@ export function workbookWith(
     (grid[firstRow] ??= [])[firstColumn] = contentOf(typed);
     width = Math.max(width, firstColumn + 1);
   }
-  const rows = Array.from(grid, (line = []) => Array.from({ length: width }, (_, c) => line[c] ?? null));
+  const rows = Array.from(grid, (line: CellContent[] | undefined = []) =>
+    Array.from({ length: width }, (_, c) => line[c] ?? null),
+  );
   return {
     title: '',
     about: '',
