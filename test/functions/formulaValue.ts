@@ -34,7 +34,9 @@ export function workbookOf(formula: string, blocks: Readonly<Record<string, Cell
   const { firstRow, firstColumn } = readArea(FORMULA_CELL)!;
   put(firstRow, firstColumn, { formula });
   const width = firstColumn + 1;
-  const rows = Array.from(grid, (line = []) => Array.from({ length: width }, (_, c) => line[c] ?? null));
+  const rows = Array.from(grid, (line: CellContent[] | undefined = []) =>
+    Array.from({ length: width }, (_, c) => line[c] ?? null),
+  );
   return {
     title: '',
     about: '',

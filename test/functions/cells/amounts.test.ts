@@ -96,6 +96,26 @@ describe('rows that are no species of the equation', () => {
     ]);
   });
 
+  it('may be held out of reaction by name, with or without the tag; a name that is not fed is an error', () => {
+    const held = (name: string) =>
+      [
+        '=EXTENT.SOLVE("A(g) = 2 B(g)", 2, A1:C3, E1:G2)',
+        {
+          A1: [
+            ['A(g)', 1, 'mol'],
+            ['B(g)', 0, 'mol'],
+            ['N2(g)', 1, 'mol'],
+          ],
+          E1: [
+            ['pressure', 1, 'bar'],
+            ['inert', name, null],
+          ],
+        },
+      ] as [string, Record<string, CellTable>];
+    expect(numberOf(...held('N2'))).toBe(numberOf(...held('N2(g)')));
+    expect(messageFrom('condition-inert', ...held('Ar'))).toContain('Ar');
+  });
+
   it('thin the gas at a pressure, and keep their amount', () => {
     const thinned = numberOf(asked('EXTENT.SOLVE', 'A1:C5'), cells(withArgon));
     expect(thinned).toBeLessThan(numberOf(asked('EXTENT.SOLVE', 'A1:C3'), cells(FEED)));

@@ -63,6 +63,16 @@ describe('a conditions table', () => {
     expect(message).toContain('as given, gas, solution, ideal liquid');
   });
 
+  it('is an error where a value cannot be, needed or not', () => {
+    expect(refused('condition-value', ['pressure', -3, 'bar'])).toContain('-3 bar');
+    expect(refused('condition-value', ['pressure', 1, 'bar'], ['temperature', -300, 'degC'])).toContain(
+      'row 2',
+    );
+    expect(refused('condition-value', ['volume', 0, 'L'], ['temperature', 300, 'K'])).toContain('volume');
+    const uncertain = refused('condition-value', ['pressure', 1, 'bar'], ['K uncertainty', -0.1, null]);
+    expect(uncertain).toContain('a number of 0 or more');
+  });
+
   it('is an error where it is no table, or too wide', () => {
     expect(messageFrom('condition-table', '=EXTENT.SOLVE("A = B", 2, {1;1}, "1 bar")')).toContain('1 bar');
     const wide: CellTable = [['pressure', 1, 'bar', 0, 'remark']];
@@ -142,6 +152,13 @@ describe('standard uncertainties', () => {
       ['temperature uncertainty', 2, 'K'],
     );
     expect(Math.abs(own - probability(...hot(2, 'K', 350)))).toBeLessThan(1e-13);
+  });
+
+  it('of a gauge pressure may be in bar, for the barometer drops out of a difference', () => {
+    const gauge = (unit: string) =>
+      probability(['pressure', 2, 'bar gauge'], ['barometer', 1, 'bar'], ['pressure uncertainty', 0.1, unit]);
+    expect(gauge('bar')).toBe(gauge('bar gauge'));
+    expect(gauge('bar')).not.toBe(0.5);
   });
 
   it('alone, twice, or below zero are errors', () => {

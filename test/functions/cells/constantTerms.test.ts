@@ -130,6 +130,14 @@ describe('terms of K that a medium does not have', () => {
       'condition-missing',
     ],
     [
+      'a gas in a volume in mole fractions',
+      '(g)',
+      'mol',
+      ['volume', 1, 'L'],
+      terms('mole fraction'),
+      'constant-basis',
+    ],
+    [
       'a pressure without its unit',
       '(g)',
       'mol',
