@@ -24,7 +24,7 @@ export interface Outcome {
   /** Which solver made it, and so how the problem and the solution are to be read. */
   readonly kind: string;
   readonly status: Status;
-  /** The phase that ran out, the species that is absent, or why it was refused; empty when settled. */
+  /** The phase that ran out, the species that is absent, why it was refused; empty when plainly settled. */
   readonly reason: string;
   /** The problem as it was solved. */
   readonly problem: object;

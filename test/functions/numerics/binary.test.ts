@@ -1,28 +1,23 @@
 import { describe, expect, it } from 'vitest';
-import { exponentOf, SMALLEST_NORMAL, timesPowerOfTwo } from '../../../functions/numerics/binary.ts';
-
-const SAMPLES = [
-  1,
-  0.7,
-  0.71,
-  1.41,
-  1.42,
-  3,
-  1e300,
-  Number.MAX_VALUE,
-  1e-300,
+import {
+  exponentOf,
+  fractionOf,
   SMALLEST_NORMAL,
-  1e-310,
-  5e-324,
-];
+  timesPowerOfTwo,
+} from '../../../functions/numerics/binary.ts';
+
+const NORMAL = [1, 0.7, 0.71, 1.41, 1.42, 3, 1e300, Number.MAX_VALUE, 1e-300, SMALLEST_NORMAL];
+const SUBNORMAL = [1e-310, 5e-324];
 
 describe('the binary exponent', () => {
-  it.each(SAMPLES)('leaves of %d a factor between sqrt(1/2) and sqrt 2', (x) => {
-    const e = exponentOf(x);
-    const factor = timesPowerOfTwo(x, -e);
-    expect(factor).toBeGreaterThan(Math.SQRT1_2 * (1 - 2 ** -20));
-    expect(factor).toBeLessThan(Math.SQRT2 * (1 + 2 ** -20));
-    expect(timesPowerOfTwo(factor, e)).toBe(x);
+  it.each(NORMAL)('leaves of %d a fraction between sqrt(1/2) and sqrt 2', (x) => {
+    const fraction = fractionOf(x, exponentOf(x));
+    expect(fraction).toBeGreaterThan(Math.SQRT1_2 * (1 - 2 ** -20));
+    expect(fraction).toBeLessThan(Math.SQRT2 * (1 + 2 ** -20));
+  });
+
+  it.each([...NORMAL, ...SUBNORMAL])('and the fraction give %d back', (x) => {
+    expect(timesPowerOfTwo(fractionOf(x, exponentOf(x)), exponentOf(x))).toBe(x);
   });
 });
 
