@@ -10,7 +10,7 @@ import { answerShape, callFunction } from './cells/call.ts';
 import type { CellFunction, CellValue, Shape } from './cells/entry.ts';
 import { InputError, inputError, isInputError } from './errors.ts';
 import { type CellPlace, recorderOf } from './plugin/recorder.ts';
-import { type EngineModule, engineValue, readArgument } from './plugin/values.ts';
+import { type EngineModule, engineValue, plainParts, readArgument } from './plugin/values.ts';
 
 export type { CallRecorder, CellPlace } from './plugin/recorder.ts';
 export type { EngineModule } from './plugin/values.ts';
@@ -38,7 +38,7 @@ export function registerEvenkeel(engine: EngineModule, ownFunctions: readonly Ce
     taken.add(name);
   }
   if (fresh.length === 0) return;
-  const plugin = pluginClass(engine, fresh, new Map(entries.map((entry) => [entry.name, entry])));
+  const plugin = pluginClass(plainParts(engine), fresh, new Map(entries.map((entry) => [entry.name, entry])));
   const translations = Object.fromEntries(fresh.map(({ name }) => [name, name]));
   HyperFormula.registerFunctionPlugin(plugin, { [LANGUAGE]: translations });
   for (const entry of fresh) ours.set(entry.name, entry);

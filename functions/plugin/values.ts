@@ -18,6 +18,13 @@ export type EngineModule = Pick<
   | 'ArraySize'
 >;
 
+/** The parts of the module as plain properties: those of its CommonJS build are worked out at each use. */
+export function plainParts(engine: EngineModule): EngineModule {
+  const { HyperFormula, FunctionPlugin, CellError, ErrorType, SimpleRangeValue, ArraySize } = engine;
+  const EmptyValue: typeof engine.EmptyValue = engine.EmptyValue;
+  return { HyperFormula, FunctionPlugin, CellError, ErrorType, SimpleRangeValue, EmptyValue, ArraySize };
+}
+
 /**
  * The value without the engine's own objects, or the first error in it: errors go on as they are, so
  * that their origin shows. Rows that hold no such object are handed on uncopied.

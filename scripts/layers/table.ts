@@ -25,7 +25,7 @@ export const LAYERS: readonly Layer[] = [
   layer('library', 'functions/index.ts', ['cells']),
   layer('catalogue', 'functions/catalogue.ts', ['cells']),
   layer('engine values', 'functions/plugin/', ['cells'], [ENGINE]),
-  layer('plugin', 'functions/plugin.ts', ['catalogue', 'engine values']),
+  layer('plugin', 'functions/plugin.ts', ['catalogue', 'engine values'], [ENGINE]),
 
   layer('problem tables', 'server/problemTables/', ['error table']),
   layer('problems', 'server/problems.ts', ['errors', 'problem tables']),
