@@ -64,7 +64,7 @@ async function bundleCommandLine(target) {
   if (!existsSync(entry)) throw new Error('server/cli.ts is missing, so there is no command line to bundle.');
   const { build: bundle } = await import('esbuild');
   await bundle({
-    entryPoints: { main: entry },
+    entryPoints: { main: entry, 'http/evaluationWorker': `${root}/server/http/evaluationWorker.ts` },
     outdir: target,
     bundle: true,
     // What is imported on demand stays in a file of its own, read only when it is wanted.

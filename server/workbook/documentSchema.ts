@@ -3,7 +3,7 @@
  *
  * The message of each part is what is wanted there; it ends the sentence "... is wanted".
  */
-import { z } from 'zod';
+import * as z from 'zod';
 import type { Status } from '../../functions/equilibrium/outcome.ts';
 
 const STATUSES = [
