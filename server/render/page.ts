@@ -1,7 +1,6 @@
 /** What every part of the report reads: the evaluation, its steps, and how places are named. */
 import type { Evaluation } from '../evaluation.ts';
 import { areaName, cellName, isOneCell, referenceName, type Reference } from '../workbook/address.ts';
-import { amountUnits, type AmountUnits } from './evidence/amountUnits.ts';
 import { html, joined, type Markup, type Part } from './html.ts';
 import { sheetReader, type SheetReader } from './sheetReader.ts';
 import { calculationOf, stepId, type Calculation } from './steps/steps.ts';
@@ -10,7 +9,6 @@ export interface Page {
   readonly evaluation: Evaluation;
   readonly calculation: Calculation;
   readonly cells: SheetReader;
-  readonly unitOfAmounts: AmountUnits;
   /** `E3` where the workbook has one sheet, `Kettle!E3` where it has several. */
   readonly placeOf: (reference: Reference) => string;
   /** The place, leading to the source sheet. */
@@ -24,7 +22,6 @@ export function pageOf(evaluation: Evaluation): Page {
     evaluation,
     calculation: calculationOf(evaluation),
     cells: sheetReader(evaluation),
-    unitOfAmounts: amountUnits(evaluation),
     placeOf,
     linkTo: (reference) => {
       const id = cellId(sheetNames.indexOf(reference.sheet), reference.firstRow, reference.firstColumn);

@@ -6,14 +6,14 @@ import { speciesMarkup } from '../typeset/mathml.ts';
 
 const DIGITS_OF_TRACE = 4;
 
-export function amountsTable(outcome: ExtentOutcome, unit: string | null): Markup {
+export function amountsTable(outcome: ExtentOutcome): Markup {
   const { problem, extent, amounts, lnAmounts } = outcome;
   const { species, feed } = problem;
   const changes = problem.stoichiometry.map((coefficient) => coefficient * extent);
   const columns = [feed, changes, amounts].map((values) => ({ values, tail: tailWidth(values) }));
   return html`<table class="amounts">
     <caption>
-      Amounts${unit === null ? null : ` in ${unit}`}
+      Amounts${problem.unit ? ` in ${problem.unit}` : null}
     </caption>
     <thead>
       <tr>

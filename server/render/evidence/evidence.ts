@@ -10,10 +10,10 @@ import { amountsTable } from './amountsTable.ts';
 
 const RESIDUAL_DIGITS = 2;
 
-/** `unit` is that of the amounts, null where nothing tells it; `id` is unique on the page. */
-export function evidence(outcome: Outcome, unit: string | null, id: string): Markup {
+/** `id` is unique on the page. */
+export function evidence(outcome: Outcome, id: string): Markup {
   const extent = isExtent(outcome) ? outcome : null;
-  const figures = [...(extent === null ? [] : extentFigures(extent, unit)), ...solverFigures(outcome)];
+  const figures = [...(extent === null ? [] : extentFigures(extent)), ...solverFigures(outcome)];
   return html`<div class="evidence">
     <p class="status">${statusSentence(outcome)}</p>
     <div class="figures">
@@ -31,9 +31,9 @@ export function evidence(outcome: Outcome, unit: string | null, id: string): Mar
           )}
         </tbody>
       </table>
-      ${extent !== null && hasAnswer(extent) ? amountsTable(extent, unit) : null}
+      ${extent !== null && hasAnswer(extent) ? amountsTable(extent) : null}
     </div>
-    ${extent === null ? null : extentPicture(extent, unit, id)}
+    ${extent === null ? null : extentPicture(extent, id)}
   </div>`;
 }
 
@@ -43,8 +43,9 @@ export function isExtent(outcome: Outcome): outcome is ExtentOutcome {
 
 type Figure = readonly [item: Part, value: Part];
 
-function extentFigures(outcome: ExtentOutcome, unit: string | null): Figure[] {
+function extentFigures(outcome: ExtentOutcome): Figure[] {
   const { problem, extent, limits, limiting } = outcome;
+  const unit = problem.unit ?? null;
   const limitingSpecies = limiting === null ? undefined : problem.species[limiting];
   const figures: Figure[] = [['ln K', numberMarkup(problem.lnK)]];
   if (!hasAnswer(outcome)) return figures;

@@ -1,11 +1,12 @@
 /** The picture of a solved reaction: ln Q against extent, with the level of K and the feasible limits. */
 import { line } from 'd3-shape';
+import { quotientCurve, type CurvePoint } from '../../../functions/equilibrium/extentCurve.ts';
 import type { ExtentOutcome } from '../../../functions/equilibrium/extentOutcome.ts';
+import { reactionQuotient } from '../../../functions/equilibrium/quotient.ts';
 import { html, type Markup } from '../html.ts';
 import { numberText, roundedText } from '../numberText.ts';
 import { frame, type Frame } from './frame.ts';
 import { markLabel } from './markLabel.ts';
-import { logQuotientOfFeed, quotientCurve, type CurvePoint } from './quotientCurve.ts';
 
 /** How far into the range, from either limit, the curve is always shown. */
 const SHOWN_FROM = 0.02;
@@ -14,8 +15,9 @@ const LABEL_DIGITS = 4;
 const LABEL_HEIGHT = 17;
 
 /** `id` is unique on the page; null where the feed leaves no range to draw, or there is no answer. */
-export function extentPicture(outcome: ExtentOutcome, unit: string | null, id: string): Markup | null {
+export function extentPicture(outcome: ExtentOutcome, id: string): Markup | null {
   const { problem, limits, extent } = outcome;
+  const unit = problem.unit ?? null;
   const [lowest, highest] = limits;
   if (!(lowest < highest) || !Number.isFinite(extent)) return null;
   const meetsK = outcome.status === 'settled' || outcome.status === 'at limit';
@@ -55,7 +57,9 @@ export function extentPicture(outcome: ExtentOutcome, unit: string | null, id: s
 }
 
 function feedPoint({ problem, limits: [lowest, highest] }: ExtentOutcome): CurvePoint | null {
-  return lowest <= 0 && 0 <= highest ? { extent: 0, lnQ: logQuotientOfFeed(problem) } : null;
+  if (lowest > 0 || highest < 0) return null;
+  const { lnQ, absentReactants } = reactionQuotient(problem);
+  return { extent: 0, lnQ: lnQ ?? (absentReactants.length === 0 ? -Infinity : Infinity) };
 }
 
 function curvePath(plot: Frame, points: readonly CurvePoint[]): string {

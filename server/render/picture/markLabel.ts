@@ -2,7 +2,7 @@
 import { html, type Markup } from '../html.ts';
 import { roundedText } from '../numberText.ts';
 import type { Frame } from './frame.ts';
-import type { CurvePoint } from './quotientCurve.ts';
+import type { CurvePoint } from '../../../functions/equilibrium/extentCurve.ts';
 
 const DIGITS = 5;
 /** Widest mean width of a letter at the picture's type size, with room to spare. */

@@ -1,7 +1,7 @@
 /** The numbered steps of the calculation. */
 import type { Outcome } from '../../../functions/equilibrium/outcome.ts';
 import { html, type Markup, type Part } from '../html.ts';
-import { solutionKey } from '../evidence/amountUnits.ts';
+import { solutionKey } from '../evidence/solutionKey.ts';
 import { evidence } from '../evidence/evidence.ts';
 import { spokenPlace, stepLink, type Page } from '../page.ts';
 import { row, section } from '../section.ts';
@@ -41,7 +41,7 @@ function stepArticle(page: Page, step: Step, shownIn: Map<string, string>): Mark
       <p><code>${first.formula.formula}</code></p>
       ${isRun(step) ? runNote(page, step) : null}${comesFrom(page, step)}
       ${isRepeated ? null : equationsOf(page, first)} ${isRun(step) ? runStatuses(step) : null}
-      ${outcomes.map((outcome, index) => evidenceOnce(page, step, outcome, index, shownIn))}
+      ${outcomes.map((outcome, index) => evidenceOnce(step, outcome, index, shownIn))}
     </div>
     <div>${stepOutput(page, step)}</div>
   </article>`;
@@ -63,13 +63,7 @@ function runStatuses(step: Step): Part {
     : html`<p>All ${step.formulas.length} places: ${statusCounts(outcomes)}</p>`;
 }
 
-function evidenceOnce(
-  page: Page,
-  step: Step,
-  outcome: Outcome,
-  index: number,
-  shownIn: Map<string, string>,
-): Markup {
+function evidenceOnce(step: Step, outcome: Outcome, index: number, shownIn: Map<string, string>): Markup {
   const key = solutionKey(outcome);
   const shown = shownIn.get(key);
   if (shown !== undefined && shown !== step.number) {
@@ -78,5 +72,5 @@ function evidenceOnce(
     </p>`;
   }
   shownIn.set(key, step.number);
-  return evidence(outcome, page.unitOfAmounts(outcome), `${stepId(step.number)}-${index + 1}`);
+  return evidence(outcome, `${stepId(step.number)}-${index + 1}`);
 }

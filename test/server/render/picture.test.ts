@@ -1,11 +1,9 @@
 import { expect, test } from 'vitest';
 import type { ExtentOutcome } from '../../../functions/equilibrium/extentOutcome.ts';
 import { extentPicture } from '../../../server/render/picture/extentPicture.ts';
-import { quotientCurve } from '../../../server/render/picture/quotientCurve.ts';
 import { closedVessel } from './fixtures/closedVessel.ts';
 import { converter } from './fixtures/converter.ts';
 import { kettle } from './fixtures/kettle.ts';
-import { lnQuotient } from './fixtures/outcomes.ts';
 import type { Evaluation } from '../../../server/evaluation.ts';
 
 const PIXEL = 0.01;
@@ -18,7 +16,7 @@ function outcomeIn(evaluation: Evaluation): ExtentOutcome {
 }
 
 function drawing(outcome: ExtentOutcome): string {
-  return extentPicture(outcome, 'mol', 'p')!.markup;
+  return extentPicture(outcome, 'p')!.markup;
 }
 
 function attribute(markup: string, element: RegExp, name: string): number {
@@ -73,18 +71,6 @@ test.each([
   ).toBe(true);
 });
 
-test('the curve agrees with ln Q worked from the amounts, and is infinite at the limits', () => {
-  const outcome = outcomeIn(converter());
-  const curve = quotientCurve(outcome.problem);
-  expect(curve[0]).toEqual({ extent: outcome.limits[0], lnQ: -Infinity });
-  expect(curve.at(-1)).toEqual({ extent: outcome.limits[1], lnQ: Infinity });
-  const inner = curve.filter(({ extent }) => extent > -1.2 && extent < 19.9);
-  expect(inner.length).toBeGreaterThan(40);
-  // amounts here are above 0.05 of 20, so that rounding is magnified less than 1000 times
-  for (const { extent, lnQ } of inner)
-    expect(Math.abs(lnQ - lnQuotient(outcome.problem, extent))).toBeLessThan(1e-12);
-});
-
 test('where a phase runs out the end is marked at the limit, away from the level of K', () => {
   const outcome = outcomeIn(closedVessel());
   const markup = drawing(outcome);
@@ -106,5 +92,5 @@ test('axes carry quantity and unit, and the picture a title and a description', 
 
 test('a feed that leaves no room has no picture', () => {
   const outcome = outcomeIn(kettle());
-  expect(extentPicture({ ...outcome, limits: [0, 0] }, 'mol', 'p')).toBeNull();
+  expect(extentPicture({ ...outcome, limits: [0, 0] }, 'p')).toBeNull();
 });
