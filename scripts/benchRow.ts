@@ -14,3 +14,8 @@ export function atMost(goal: number, name: string, value: number, unit = 'times'
 export function atLeast(goal: number, name: string, value: number, unit = 'times'): Row {
   return { name, value, unit, goal: `at least ${goal}`, met: value >= goal };
 }
+
+/** A figure to stand beside the others, without a goal of its own. */
+export function forComparison(name: string, value: number, unit = 'times'): Row {
+  return { name, value, unit, goal: 'for comparison', met: true };
+}

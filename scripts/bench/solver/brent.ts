@@ -4,25 +4,12 @@
  * Source: Brent, Algorithms for Minimization without Derivatives (1973), chapter 4, procedure zero.
  */
 import { extentLimits, type ExtentProblem } from '../../../functions/equilibrium/index.ts';
+import { affinity } from './affinity.ts';
 
 /** The extent, to the last bit that Brent's own tolerance allows; all species mixed, mole fractions. */
 export function solveByBrent(problem: ExtentProblem): number {
   const [lowest, highest] = extentLimits(problem.stoichiometry, problem.feed);
   return brent((extent) => affinity(problem, extent), lowest, highest);
-}
-
-function affinity({ stoichiometry, feed, inert, lnScale, lnK }: ExtentProblem, extent: number): number {
-  let sum = -lnK;
-  let change = 0;
-  let total = inert;
-  for (let i = 0; i < feed.length; i++) {
-    const nu = stoichiometry[i]!;
-    const n = Math.max(feed[i]! + nu * extent, 0);
-    sum += nu * Math.log(n);
-    change += nu;
-    total += n;
-  }
-  return sum + change * (lnScale - Math.log(total));
 }
 
 function brent(f: (x: number) => number, lower: number, upper: number): number {
