@@ -12,6 +12,8 @@ import { setUp } from './setUp.mjs';
 
 const COMMAND_LINE = `${root}/dist/cli.js`;
 const SAMPLES = `${root}/workbook-samples`;
+/** What the server ends with when it was stopped by Ctrl-C. */
+const INTERRUPTED = 130;
 
 await setUp();
 const areGood = readdirSync(SAMPLES)
@@ -43,5 +45,6 @@ function serve(isGood) {
   // Ctrl-C reaches the server by itself; a signal sent to this process alone is passed on.
   for (const signal of /** @type {const} */ (['SIGINT', 'SIGTERM']))
     process.on(signal, () => server.kill(signal));
-  server.on('exit', (code) => process.exit(isGood ? (code ?? 0) : 1));
+  // Ending the server is how this ends; npm would call its 130 for an interruption a failure.
+  server.on('exit', (code) => process.exit(isGood && (code === 0 || code === INTERRUPTED) ? 0 : 1));
 }
