@@ -39,6 +39,8 @@ export interface Versions {
   readonly evenkeel: string;
   readonly hyperformula: string;
   readonly node: string;
+  /** The file of the analyst's own functions, where one was given. */
+  readonly ownFunctions: { readonly file: string; readonly sha256: string } | null;
 }
 
 /** What a cell holds: a number, a text, a truth value, a blank (null) or an error. */

@@ -12,16 +12,9 @@ import { pathToFileURL } from 'node:url';
 import { catalogue } from '../functions/catalogue.ts';
 import type { CellFunction } from '../functions/cells/entry.ts';
 import { inputError } from '../functions/errors.ts';
+import type { OwnFunctions } from './engine/ownFunctions.ts';
 import { systemReason } from './files/reasons.ts';
 import { serverError } from './problems.ts';
-
-export interface OwnFunctions {
-  /** As the person named it. */
-  readonly file: string;
-  /** Digest of the file's bytes; what the file imports has its own. */
-  readonly sha256: string;
-  readonly functions: readonly CellFunction[];
-}
 
 /**
  * Errors: `file-unreadable`, `own-functions-file`, `own-functions-none`, `own-functions-entry`, and

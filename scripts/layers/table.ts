@@ -34,11 +34,11 @@ export const LAYERS: readonly Layer[] = [
   layer('evaluation', 'server/evaluation.ts', ['workbook']),
   layer('engine', 'server/engine/', ['evaluation', 'plugin'], [ENGINE]),
   layer('batch', 'server/batch/', ['engine']),
-  layer('audit', 'server/audit/', ['evaluation'], ['canonicalize']),
+  layer('audit', 'server/audit/', ['evaluation']),
   layer('render', 'server/render/', ['evaluation'], ['d3-scale', 'd3-shape', 'temml']),
   layer('files', 'server/files/', ['problems']),
   layer('given text', 'server/givenText.ts', ['problems', 'nearest']),
-  layer('own functions', 'server/ownFunctions.ts', ['files', 'catalogue']),
+  layer('own functions', 'server/ownFunctions.ts', ['files', 'engine']),
   layer(
     'http',
     'server/http/',

@@ -3,7 +3,8 @@ import { evaluateWorkbook } from '../engine/evaluateWorkbook.ts';
 import type { Given } from '../engine/host.ts';
 import { type Evaluation, isError, type OutputValue, type Value } from '../evaluation.ts';
 import { givenByName } from '../givenText.ts';
-import { loadOwnFunctions, type OwnFunctions } from '../ownFunctions.ts';
+import type { OwnFunctions } from '../engine/ownFunctions.ts';
+import { loadOwnFunctions } from '../ownFunctions.ts';
 import { serverError } from '../problems.ts';
 import { ExitCode } from './exitCode.ts';
 import { readWorkbook } from './readWorkbook.ts';
@@ -31,10 +32,10 @@ export async function evaluated(
 ): Promise<Evaluated> {
   const given = givenByName(set.map(nameAndText));
   const ownFunctions = functions === undefined ? null : await loadOwnFunctions(functions);
-  const workbook = await readWorkbook(file, stdin);
+  const workbook = await readWorkbook(file, stdin, timeLimit);
   const evaluation = evaluateWorkbook(workbook, {
     given,
-    ownFunctions: ownFunctions?.functions ?? [],
+    ownFunctions,
     ...(timeLimit !== undefined && { timeLimitSeconds: timeLimit }),
   });
   return { given, evaluation, ownFunctions };

@@ -2,6 +2,7 @@ import { createReadStream } from 'node:fs';
 import { basename } from 'node:path';
 import type { Readable } from 'node:stream';
 import { systemReason } from '../files/reasons.ts';
+import { DEFAULT_TIME_LIMIT_SECONDS, withTimeLimit } from '../engine/timeLimit.ts';
 import { serverError } from '../problems.ts';
 import { unusableFile } from '../workbook/fileProblems.ts';
 import type { Workbook } from '../workbook/model.ts';
@@ -13,11 +14,16 @@ import { MAX_WORKBOOK_BYTES, readYamlWorkbook } from '../workbook/yaml.ts';
  * Messages name the file as the person did; the workbook keeps its name without the folder, so that
  * what is made of it does not depend on where it lay.
  *
- * Errors: `file-unreadable`, and UnusableWorkbook with everything that is wrong in the file.
+ * Errors: `file-unreadable`, `time-limit` for a text that takes too long to read, and UnusableWorkbook with everything that is wrong in the file.
  */
-export async function readWorkbook(file: string, stdin: Readable): Promise<Workbook> {
+export async function readWorkbook(
+  file: string,
+  stdin: Readable,
+  timeLimitSeconds = DEFAULT_TIME_LIMIT_SECONDS,
+): Promise<Workbook> {
   const bytes = await bytesOf(file === '-' ? stdin : createReadStream(file), file);
-  return { ...readYamlWorkbook(bytes, file), file: basename(file) };
+  const workbook = withTimeLimit(timeLimitSeconds, file, () => readYamlWorkbook(bytes, file));
+  return { ...workbook, file: basename(file) };
 }
 
 /** Reads no further than a workbook may be long: a pipe need not end. */

@@ -62,6 +62,18 @@ export class Cells {
     return rows;
   }
 
+  /** Every value of a sheet, row by row from A1, as far as there are any. */
+  sheet(name: string): Value[][] {
+    const sheet = this.#engine.getSheetId(name)!;
+    const values = this.#engine.getSheetValues(sheet);
+    const { width, height } = usedSize(values);
+    return Array.from({ length: height }, (_, row) =>
+      Array.from({ length: width }, (__, col) =>
+        this.readValue(values[row]![col] ?? null, { sheet, row, col }),
+      ),
+    );
+  }
+
   /** The cell where the error of this cell began; itself where the error is its own. */
   origin(place: CellPlace): CellPlace {
     const error = this.#engine.getCellValue(place);
@@ -106,4 +118,18 @@ export class Cells {
       };
     });
   }
+}
+
+/** The rows and columns up to the last value; a cell that is only referred to makes the engine's sheet larger. */
+function usedSize(values: readonly (readonly unknown[])[]): { width: number; height: number } {
+  let width = 0;
+  let height = 0;
+  values.forEach((cells, row) =>
+    cells.forEach((value, col) => {
+      if (value === null || value === undefined) return;
+      width = Math.max(width, col + 1);
+      height = row + 1;
+    }),
+  );
+  return { width, height };
 }

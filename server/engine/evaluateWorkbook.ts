@@ -1,17 +1,17 @@
 /**
  * One evaluation of a workbook under a time limit.
  */
-import type { CellFunction } from '../../functions/cells/entry.ts';
 import type { Evaluation } from '../evaluation.ts';
 import type { Workbook } from '../workbook/model.ts';
 import { type Given, Host } from './host.ts';
 import { checkGiven } from './given.ts';
+import type { OwnFunctions } from './ownFunctions.ts';
 import { DEFAULT_TIME_LIMIT_SECONDS, withTimeLimit } from './timeLimit.ts';
 
 export interface EvaluateOptions {
   /** Values for inputs, in the place of the workbook's own. */
   readonly given?: Given;
-  readonly ownFunctions?: readonly CellFunction[];
+  readonly ownFunctions?: OwnFunctions | null;
   readonly timeLimitSeconds?: number;
   /** What NOW and TODAY stand for; the present where left out. */
   readonly instant?: string;
@@ -24,7 +24,7 @@ export interface EvaluateOptions {
  * Whatever is wrong in a cell is in the evaluation.
  */
 export function evaluateWorkbook(workbook: Workbook, options: EvaluateOptions = {}): Evaluation {
-  const { given = {}, ownFunctions = [], timeLimitSeconds = DEFAULT_TIME_LIMIT_SECONDS } = options;
+  const { given = {}, ownFunctions = null, timeLimitSeconds = DEFAULT_TIME_LIMIT_SECONDS } = options;
   const instant = options.instant ?? new Date().toISOString();
   checkGiven(workbook, given);
   return withTimeLimit(timeLimitSeconds, workbook.file, () => {

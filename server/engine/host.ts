@@ -1,7 +1,6 @@
 /**
  * A workbook standing in an engine: built once, evaluated, and run again for other inputs.
  */
-import type { CellFunction } from '../../functions/cells/entry.ts';
 import type {
   CheckResult,
   Evaluation,
@@ -16,13 +15,14 @@ import { isFormula, type Scalar, type Workbook } from '../workbook/model.ts';
 import { asText, type BuiltEngine, buildEngine } from './build.ts';
 import { Cells } from './cells.ts';
 import { checkResult, statusesOf } from './checks.ts';
+import type { OwnFunctions } from './ownFunctions.ts';
 import { Session } from './session.ts';
 import { answerArea } from './syntax.ts';
 import { versions } from './versions.ts';
 
 export interface HostOptions {
-  /** The analyst's own functions. */
-  readonly ownFunctions?: readonly CellFunction[];
+  /** The analyst's own functions, where there are any. */
+  readonly ownFunctions?: OwnFunctions | null;
   /** What NOW and TODAY stand for, in ISO 8601. */
   readonly instant: string;
 }
@@ -34,6 +34,7 @@ export type Outputs = Record<string, OutputValue>;
 
 export class Host {
   readonly #workbook: Workbook;
+  readonly #ownFunctions: OwnFunctions | null;
   readonly #built: BuiltEngine;
   readonly #cells: Cells;
   readonly #session: Session;
@@ -43,10 +44,11 @@ export class Host {
   #given: Given = {};
 
   /** Builds the engine; a formula that it cannot take becomes an error in its cell alone. */
-  constructor(workbook: Workbook, { ownFunctions = [], instant }: HostOptions) {
+  constructor(workbook: Workbook, { ownFunctions = null, instant }: HostOptions) {
     this.#workbook = workbook;
+    this.#ownFunctions = ownFunctions;
     this.#session = new Session(instant);
-    this.#built = buildEngine(workbook, ownFunctions, this.#session);
+    this.#built = buildEngine(workbook, ownFunctions?.functions ?? [], this.#session);
     this.#cells = new Cells(this.#built.engine, this.#session, this.#built.refused);
     this.#own = Object.fromEntries(
       workbook.inputs.map(({ name, cell }) => [
@@ -99,7 +101,7 @@ export class Host {
     return {
       evaluation: 1,
       workbook: { title, about, file, sha256 },
-      versions: versions(),
+      versions: versions(this.#ownFunctions),
       inputs: this.#inputs(),
       outputs: this.outputs(),
       sheets,
@@ -121,20 +123,7 @@ export class Host {
   }
 
   #sheets(): Record<string, Value[][]> {
-    const { engine } = this.#built;
-    return Object.fromEntries(
-      this.#workbook.sheets.map(({ name }) => {
-        const sheet = engine.getSheetId(name)!;
-        const values = engine.getSheetValues(sheet);
-        const { width, height } = usedSize(values);
-        const rows = Array.from({ length: height }, (_, row) =>
-          Array.from({ length: width }, (__, col) =>
-            this.#cells.readValue(values[row]![col] ?? null, { sheet, row, col }),
-          ),
-        );
-        return [name, rows];
-      }),
-    );
+    return Object.fromEntries(this.#workbook.sheets.map(({ name }) => [name, this.#cells.sheet(name)]));
   }
 
   #formulas(): Record<string, FormulaCell> {
@@ -192,18 +181,4 @@ export class Host {
     if (results.length > 0) this.set(given);
     return results;
   }
-}
-
-/** The rows and columns up to the last value; a cell that is only referred to makes the engine's sheet larger. */
-function usedSize(values: readonly (readonly unknown[])[]): { width: number; height: number } {
-  let width = 0;
-  let height = 0;
-  values.forEach((cells, row) =>
-    cells.forEach((value, col) => {
-      if (value === null || value === undefined) return;
-      width = Math.max(width, col + 1);
-      height = row + 1;
-    }),
-  );
-  return { width, height };
 }

@@ -6,7 +6,7 @@ import { loadOwnFunctions } from '../ownFunctions.ts';
 import type { Job, Reply, ThreadSetup } from './evaluationThreads.ts';
 
 const { workbooks, ownFunctionsFile, timeLimitSeconds } = workerData as ThreadSetup;
-const ownFunctions = ownFunctionsFile === null ? [] : (await loadOwnFunctions(ownFunctionsFile)).functions;
+const ownFunctions = ownFunctionsFile === null ? null : await loadOwnFunctions(ownFunctionsFile);
 
 parentPort!.on('message', (job: Job) => parentPort!.postMessage(replyTo(job)));
 

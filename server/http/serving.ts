@@ -2,7 +2,7 @@
 import type { Given } from '../engine/host.ts';
 import type { Evaluation } from '../evaluation.ts';
 import { suggestion } from '../nearest.ts';
-import type { OwnFunctions } from '../ownFunctions.ts';
+import type { OwnFunctions } from '../engine/ownFunctions.ts';
 import { serverError } from '../problems.ts';
 import type { Workbook } from '../workbook/model.ts';
 

@@ -21,6 +21,9 @@ export function versions({ evaluation }: Page): Markup {
     ['HyperFormula', worked.hyperformula],
     ['Node.js', worked.node],
     ['workbook, SHA-256', workbook.sha256],
+    ...(worked.ownFunctions === null
+      ? []
+      : [[`own functions ${worked.ownFunctions.file}, SHA-256`, worked.ownFunctions.sha256]]),
     ...(instant === null ? [] : [['NOW and TODAY stood for', instant]]),
   ];
   const calculation = html`<table class="facts">

@@ -1,7 +1,7 @@
 import { limitsOfUse } from '../../render/closing.ts';
 import { html, joined, type Part } from '../../render/html.ts';
 import { type Line, padSection } from '../../render/section.ts';
-import type { OwnFunctions } from '../../ownFunctions.ts';
+import type { OwnFunctions } from '../../engine/ownFunctions.ts';
 import type { Workbook } from '../../workbook/model.ts';
 import type { Serving } from '../serving.ts';
 import { documentOf } from './document.ts';
