@@ -5,12 +5,6 @@
  */
 export const GAS_CONSTANT = 8.31446261815324;
 
-/** Standard pressure, bar (100 kPa). Source: IUPAC, Pure Appl. Chem. 54 (1982) 1239 (from memory). */
-export const STANDARD_PRESSURE_BAR = 1;
-
-/** Standard concentration, mol/L. Source: IUPAC Green Book, 3rd edition, section 2.11 (from memory). */
-export const STANDARD_CONCENTRATION_MOL_PER_L = 1;
-
 /** Celsius temperature is kelvin less this. Source: SI Brochure, 9th edition, section 2.3.1 (from memory). */
 export const ZERO_CELSIUS_K = 273.15;
 

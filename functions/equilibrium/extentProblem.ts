@@ -5,6 +5,8 @@ import { LARGEST_WEIGHT_SUM } from '../numerics/logSum.ts';
 export interface ExtentProblem {
   /** Labels, for messages only. */
   readonly species: readonly string[];
+  /** Unit of the amounts and of the extent, for reports only; null or absent where they have none. */
+  readonly unit?: string | null;
   /** Coefficients: products positive, reactants negative, never 0. */
   readonly stoichiometry: readonly number[];
   /** Amounts to begin with; negative only where something is taken out. */

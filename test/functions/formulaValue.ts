@@ -22,7 +22,7 @@ export function formulaValue(
 }
 
 /** A workbook with one sheet named Sheet that holds the blocks and the formula in AA1. */
-export function workbookOf(formula: string, blocks: Readonly<Record<string, CellTable>> = {}): Workbook {
+function workbookOf(formula: string, blocks: Readonly<Record<string, CellTable>> = {}): Workbook {
   const grid: CellContent[][] = [];
   const put = (row: number, column: number, content: CellContent) => {
     (grid[row] ??= [])[column] = content;

@@ -4,11 +4,11 @@
  * ln K(activity) = ln K(stated) + change * ln(reference), with `change` the sum of the stoichiometric
  * numbers of the mixed species, and the reference the size of the stated unit on the activity basis.
  */
-import { GAS_CONSTANT } from '../../data/constants.ts';
+import { GAS_CONSTANT_L_BAR } from '../../data/constants.ts';
 import type { Unit } from '../../chemistry/units/unit.ts';
 import { inputError } from '../../errors.ts';
 import { type Conditions, NO_CONDITIONS } from '../reading/conditions.ts';
-import { LITRE_BAR_PER_JOULE, pressureBar, temperatureK } from './state.ts';
+import { pressureBar, temperatureK } from './state.ts';
 import type { Setting } from './medium.ts';
 
 /** Beyond this the constant is a slip of the pen; exp(1500) exceeds any equilibrium that can be measured. */
@@ -69,10 +69,7 @@ export function lnReference(
       if (unit!.quantity === 'pressure' && terms !== 'concentration') return Math.log(unit!.factor);
       if (unit!.quantity === 'concentration' && terms === 'concentration') {
         return Math.log(
-          unit!.factor *
-            LITRE_BAR_PER_JOULE *
-            GAS_CONSTANT *
-            temperatureK(conditions, 'K in terms of concentration'),
+          unit!.factor * GAS_CONSTANT_L_BAR * temperatureK(conditions, 'K in terms of concentration'),
         );
       }
       break;

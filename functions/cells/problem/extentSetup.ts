@@ -3,7 +3,7 @@
  */
 import type { CheckedReaction } from '../../chemistry/balancedEquation.ts';
 import { matchSpecies } from '../../chemistry/match.ts';
-import { GAS_CONSTANT } from '../../data/constants.ts';
+import { GAS_CONSTANT_L_BAR } from '../../data/constants.ts';
 import type { ExtentProblem } from '../../equilibrium/extentProblem.ts';
 import { inputError } from '../../errors.ts';
 import type { AmountsTable } from '../reading/amounts.ts';
@@ -14,7 +14,7 @@ import { lnReference } from './constant.ts';
 import type { Fed } from './fed.ts';
 import { feedOf } from './feed.ts';
 import { countsInMedium, type Setting, settingOf } from './medium.ts';
-import { LITRE_BAR_PER_JOULE, pressureBar, temperatureK, volumeL } from './state.ts';
+import { pressureBar, temperatureK, volumeL } from './state.ts';
 
 export interface ExtentSetup {
   readonly reaction: CheckedReaction;
@@ -46,6 +46,7 @@ export function extentSetup(
   const lnBasisShift = change === 0 ? 0 : change * lnReference(setting, conditions, fed.reference);
   const problem: ExtentProblem = {
     species: setting.species,
+    unit: fed.unitText,
     stoichiometry: reaction.stoichiometry,
     feed,
     mixed,
@@ -68,7 +69,7 @@ function lnScale({ medium, isFraction }: Setting, fed: Fed, conditions: Conditio
   }
   if (medium === 'gas') {
     if (basis === 'pressure') return Math.log(factor);
-    const RT = LITRE_BAR_PER_JOULE * GAS_CONSTANT * temperatureK(conditions, 'a gas in a volume');
+    const RT = GAS_CONSTANT_L_BAR * temperatureK(conditions, 'a gas in a volume');
     if (basis === 'concentration') return Math.log(factor * RT);
     if (basis === 'amount') return Math.log((factor * RT) / volumeL(conditions, 'a gas in a volume'));
     throw wrongBasis(fed, 'a gas in a volume', 'mol, mol/L or bar');

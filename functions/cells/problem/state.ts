@@ -5,9 +5,6 @@ import { readUnit } from '../../chemistry/units/readUnit.ts';
 import { inputError } from '../../errors.ts';
 import { type Conditions, measured } from '../reading/conditions.ts';
 
-/** 1 J is 0.01 L bar, exactly. */
-export const LITRE_BAR_PER_JOULE = 0.01;
-
 /** In kelvin, bar or litres; nothing on earth is larger, and no product of it overflows. */
 const LARGEST_CONDITION = 1e15;
 
