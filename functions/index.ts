@@ -1,5 +1,6 @@
 /**
- * What an own-functions file needs: `defineFunction`, the readers of arguments, and `inputError`.
+ * What an own-functions file needs: `defineFunction`, the readers of arguments, and `InputError` with a
+ * code of its own: `throw new InputError('plant-brine', 'the share is above 0.25. Give less.')`.
  */
 export { defineFunction } from './cells/entry.ts';
 export type {

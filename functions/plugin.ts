@@ -5,6 +5,7 @@
  * engine is imported here: the caller hands over the build that it uses. This is the only file
  * of the functions that knows the engine.
  */
+import type { CellError } from 'hyperformula';
 import { catalogue } from './catalogue.ts';
 import { answerShape, callFunction } from './cells/call.ts';
 import type { CellFunction, CellValue, Shape } from './cells/entry.ts';
@@ -135,13 +136,16 @@ function work(
   const recorder = recorderOf(plugin.config.context);
   try {
     const values: (CellValue | undefined)[] = [];
+    let error: CellError | undefined;
+    // Every argument is evaluated, so that no call inside a later one keeps the evidence of an earlier time.
     for (const argument of node.args) {
       const value = readArgument(engine, plugin.evaluateAst(argument, state));
-      if (value instanceof engine.CellError) {
-        recorder?.passedOn(state.formulaAddress, node);
-        return value;
-      }
-      values.push(argument.type === 'EMPTY' ? undefined : value);
+      if (value instanceof engine.CellError) error ??= value;
+      else values.push(argument.type === 'EMPTY' ? undefined : value);
+    }
+    if (error !== undefined) {
+      recorder?.passedOn(state.formulaAddress, node);
+      return error;
     }
     const answer = callFunction(entry, values);
     const result = engineValue(engine, answer.value, declared);

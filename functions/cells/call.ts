@@ -46,25 +46,25 @@ export function usage(entry: CellFunction): string {
  * Throws an `InputError` when the number of arguments, or one of them, does not fit.
  */
 export function callFunction(entry: CellFunction, values: readonly (CellValue | undefined)[]): Answer {
-  const { names, parameters, repeats } = signatureOf(entry);
-  checkCount(entry, values.length);
+  const signature = signatureOf(entry);
+  const { names, parameters, repeats } = signature;
+  checkCount(entry, signature, values.length);
   const given: Record<string, unknown> = {};
   for (let i = 0; i < names.length - repeats; i++) {
     const value = values[i];
     if (value === undefined && parameters[i]!.isOptional) continue;
     given[names[i]!] = parameters[i]!.read(value ?? null, names[i]!);
   }
-  if (repeats > 0) readRepeated(given, entry, values);
+  if (repeats > 0) readRepeated(given, signature, values);
   return entry.run(given);
 }
 
 /** Reads the repeated arguments turn by turn; each parameter collects a list. */
 function readRepeated(
   given: Record<string, unknown>,
-  entry: CellFunction,
+  { names, parameters, repeats }: Signature,
   values: readonly (CellValue | undefined)[],
 ): void {
-  const { names, parameters, repeats } = signatureOf(entry);
   const first = names.length - repeats;
   for (let i = first; i < names.length; i++) {
     const list: unknown[] = [];
@@ -86,8 +86,7 @@ export function answerShape(entry: CellFunction, shapes: readonly (Shape | undef
 
 const ONE_CELL: Shape = { rows: 1, columns: 1 };
 
-function checkCount(entry: CellFunction, count: number): void {
-  const { names, required, repeats } = signatureOf(entry);
+function checkCount(entry: CellFunction, { names, required, repeats }: Signature, count: number): void {
   const isWhole = repeats === 0 ? count <= names.length : (count - names.length) % repeats === 0;
   if (count >= required && isWhole) return;
   const takes =

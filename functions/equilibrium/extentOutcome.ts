@@ -64,15 +64,16 @@ export function report(problem: ExtentProblem, range: Range, terms: Terms, endin
   const { base, rate, position } = terms;
   const { unit, exponent, x, f } = ending;
   let { status, reason } = ending;
-  const amounts: number[] = [];
-  const lnAmounts: (number | null)[] = [];
-  for (let i = 0; i < problem.species.length; i++) {
+  const count = problem.species.length;
+  const amounts = new Array<number>(count);
+  const lnAmounts = new Array<number | null>(count);
+  for (let i = 0; i < count; i++) {
     const at = position[i]!;
     const power = base[at] === 0 ? exponent : 0;
     const scaled = base[at] === 0 ? rate[at]! * unit + 0 : base[at]! + rate[at]! * x;
     const amount = timesPowerOfTwo(scaled, power);
-    amounts.push(amount);
-    lnAmounts.push(scaled === 0 ? null : Math.log(scaled) + power * Math.LN2);
+    amounts[i] = amount;
+    lnAmounts[i] = scaled === 0 ? null : Math.log(scaled) + power * Math.LN2;
     if (amount < SMALLEST_NORMAL && scaled !== 0 && status === 'settled') status = 'at limit';
   }
 

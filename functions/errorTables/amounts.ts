@@ -12,7 +12,7 @@ export const AMOUNT_ERRORS = {
     remedy: 'Give the name of the species as the equation writes it.',
   },
   'amounts-blank': {
-    says: '{place} is blank; a blank means an amount to be found, and this function finds none',
+    says: '{place} is blank, and this function has no amount to find',
     remedy: 'Give the amount, 0 where the species is absent.',
   },
   'amounts-number': {
@@ -27,8 +27,12 @@ export const AMOUNT_ERRORS = {
     says: '{place} has {given} as its standard uncertainty',
     remedy: 'Give a number of 0 or more in the unit of the amount, or leave it blank.',
   },
-  'amounts-heading': {
-    says: 'the amounts have {given} as the heading of their uncertainties',
+  'heading-unit': {
+    says: 'the heading of {argument} holds a unit in {given}, which is not read there',
+    remedy: 'Give the unit of each row in the third column.',
+  },
+  'heading-uncertainty': {
+    says: '{argument} has {given} as the heading of its uncertainties',
     remedy: 'Write standard uncertainty, or expanded uncertainty (k=2).',
   },
   'amounts-missing': {
@@ -59,6 +63,15 @@ export const AMOUNT_ERRORS = {
   'amounts-as-given': {
     says: '{place} is in {unit}, while K speaks of the amounts as given in another unit',
     remedy: 'Give all species in one unit, or state a medium.',
+  },
+  'amounts-fraction': {
+    says: '{place} is in {unit}, which may mean moles or mass where it is no gas',
+    remedy: 'Write mol % or mol/mol, or give mol or kg.',
+  },
+  'amounts-dissolved': {
+    says: '{place} is dissolved and given in {unit}, and nothing says that K is in terms of it too',
+    remedy:
+      'State medium | solution where K is in mol/L, or K in terms of | concentration | {unit}, or medium | as given.',
   },
   'amounts-basis': {
     says: 'the amounts are in {unit}, which does not fit {medium}',

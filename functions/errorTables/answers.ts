@@ -27,9 +27,13 @@ export const ANSWER_ERRORS = {
     remedy:
       'Add standard uncertainties to the amounts or the conditions, or the row K uncertainty (in ln K).',
   },
+  'problem-unfit': {
+    says: 'there is no answer: {reason}',
+    remedy: 'Correct the amounts, the coefficients or the constant that this names.',
+  },
   'not-solved': {
-    says: 'the equilibrium was not found: {status}, {reason}',
-    remedy: 'EXTENT.EVIDENCE with the same arguments tells more.',
+    says: 'the equilibrium was not worked ({status}): {reason}',
+    remedy: 'Correct the amounts, the coefficients or the constant that this names.',
   },
   'extent-infeasible': {
     says: 'the extent {extent} makes an amount negative; it may be {lowest} to {highest}',
@@ -38,6 +42,10 @@ export const ANSWER_ERRORS = {
   'evidence-item': {
     says: 'the evidence has no item "{item}"',
     remedy: 'Its items are {items}.',
+  },
+  'phase-unknown-line': {
+    says: '{place} has no phase tag, so that it is not known whether it is in the phase asked for',
+    remedy: 'Tag it with (g), (l), (s) or (aq).',
   },
   'phase-word': {
     says: 'the phase is "{phase}"',

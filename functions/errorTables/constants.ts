@@ -14,6 +14,10 @@ export const CONSTANT_ERRORS = {
     says: 'ln K is {lnK}, so that K itself cannot be held in a cell',
     remedy: 'Work with ln K and the row K written as | ln K.',
   },
+  'restate-rows': {
+    says: 'the conditions have a row {row}, beside the terms that are given as arguments',
+    remedy: 'Leave that row out of the conditions; K is given as a number in the terms `from`.',
+  },
   'restate-terms': {
     says: '{argument} is "{given}", which names no terms of a constant',
     remedy: 'Write activity, pressure and its unit, concentration and its unit, or mole fraction.',

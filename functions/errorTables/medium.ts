@@ -2,9 +2,17 @@
 import type { ErrorTemplate } from '../errorTable.ts';
 
 export const MEDIUM_ERRORS = {
-  'medium-contradiction': {
-    says: '{what}',
-    remedy: '{mend}.',
+  'medium-two-rows': {
+    says: 'the gas of {equation} has both a pressure row and a volume row',
+    remedy: 'Keep the one that stays constant while the reaction runs.',
+  },
+  'medium-as-given': {
+    says: 'the medium is as given, so that the {row} row has no meaning',
+    remedy: 'Take out the {row} row, or state medium | gas.',
+  },
+  'medium-phase': {
+    says: '{species} is neither mixed in the medium {medium} nor a pure phase beside it',
+    remedy: 'Change the medium row or the phase tag; medium | as given takes activities of several phases.',
   },
   'medium-tags-forgotten': {
     says: 'the conditions give a {row}, but in {equation} nothing is tagged as a gas and no medium is stated',
@@ -32,8 +40,12 @@ export const MEDIUM_ERRORS = {
     remedy: 'Add the row {name} with its unit.',
   },
   'condition-range': {
-    says: 'the {name} is {value} in base units, but it must be greater than 0 and at most 1e15',
+    says: 'the {name} comes to {value}, but it must be greater than 0 and at most 1e15',
     remedy: 'Correct the {name} row.',
+  },
+  'barometer-range': {
+    says: 'the barometer reads {value} bar, which it does nowhere on earth',
+    remedy: 'Check its unit; most barometers read in mbar or hPa.',
   },
   'condition-inert': {
     says: 'the conditions hold {name} out of reaction, but it is no line of the amounts beside {equation}',

@@ -16,7 +16,6 @@ export class Session implements CallRecorder {
   readonly #instant: string;
   readonly #calls = new Map<string, Map<object, Call>>();
   #isInstantRead = false;
-  #isDetached = false;
 
   /** `instant` is what NOW and TODAY stand for, in ISO 8601. */
   constructor(instant: string) {
@@ -65,23 +64,7 @@ export class Session implements CallRecorder {
     return undefined;
   }
 
-  /** Forgets everything, as must be done when a formula is overwritten. */
-  clear(): void {
-    this.#calls.clear();
-  }
-
-  /** Works `calculate` without recording: the engine evaluates loose formulas as if they stood in A1. */
-  detached<Result>(calculate: () => Result): Result {
-    this.#isDetached = true;
-    try {
-      return calculate();
-    } finally {
-      this.#isDetached = false;
-    }
-  }
-
   #record(cell: CellPlace, node: object, call: Call): void {
-    if (this.#isDetached) return;
     const key = keyOf(cell);
     const calls = this.#calls.get(key);
     if (calls === undefined) this.#calls.set(key, new Map([[node, call]]));

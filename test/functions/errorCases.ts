@@ -53,6 +53,7 @@ const CONDITIONS: readonly ErrorCase[] = [
     solve('A(g) = 2 B(g)', '"pressure", -2, "bar gauge", "barometer", 1, "bar"'),
     'pressure',
   ],
+  ['barometer-range', solve('A(g) = 2 B(g)', '"pressure", 2, "bar gauge", "barometer", 1013, "bar"'), '1013'],
   ['condition-inert', solve('A = B', '"inert", "N2", ""'), 'N2'],
   ['temperature-range', '=K.FROM.GIBBS(1, -5)', 'temperature'],
 ];
@@ -70,7 +71,7 @@ const AMOUNTS: readonly ErrorCase[] = [
     rows(['A', 1, 'mol', -1], ['B', 1, 'mol', 0]),
   ],
   [
-    'amounts-heading',
+    'heading-uncertainty',
     '=EXTENT.SOLVE("A = B", 2, A1:D3)',
     'guess',
     rows(['species', 'amount', 'unit', 'guess'], ['A', 1, 'mol', 0], ['B', 1, 'mol', 0]),
@@ -93,6 +94,24 @@ const AMOUNTS: readonly ErrorCase[] = [
     rows(['A', 1, 'mol'], ['B', 1, 'kmol']),
   ],
   [
+    'amounts-fraction',
+    '=EXTENT.SOLVE("A(l) = B(l)", 2, A1:C2, CONDITIONS.TABLE("medium", "ideal liquid", ""))',
+    'row 1 (A(l))',
+    rows(['A(l)', 60, '%'], ['B(l)', 40, '%']),
+  ],
+  [
+    'amounts-dissolved',
+    '=EXTENT.SOLVE("HA(aq) = H^+(aq) + A^-(aq)", 0.00001, A1:C3)',
+    'row 1 (HA(aq))',
+    rows(['HA(aq)', 100, 'mmol/L'], ['H^+(aq)', 0, 'mmol/L'], ['A^-(aq)', 0, 'mmol/L']),
+  ],
+  [
+    'heading-unit',
+    '=EXTENT.SOLVE("A = B", 2, A1:B3)',
+    'amount / kmol',
+    rows(['species', 'amount / kmol'], ['A', 1], ['B', 0]),
+  ],
+  [
     'amounts-basis',
     '=EXTENT.SOLVE("A(g) = 2 B(g)", 2, A1:C2, E1:G1)',
     'mol/L',
@@ -102,7 +121,9 @@ const AMOUNTS: readonly ErrorCase[] = [
 ];
 
 const MEDIUM: readonly ErrorCase[] = [
-  ['medium-contradiction', solve('A(g) = 2 B(g)', '"pressure", 1, "bar", "volume", 1, "L"'), 'volume'],
+  ['medium-two-rows', solve('A(g) = 2 B(g)', '"pressure", 1, "bar", "volume", 1, "L"'), 'volume'],
+  ['medium-as-given', solve('A(g) = 2 B(g)', '"pressure", 1, "bar", "medium", "as given", ""'), 'pressure'],
+  ['medium-phase', solve('A(g) = B(l)', '"medium", "ideal liquid", ""'), 'A(g)'],
   ['medium-tags-forgotten', solve('A = B', '"pressure", 1, "bar"'), '(g)'],
   ['medium-missing', solve('A(g) = 2 B(g)'), '+1'],
   ['medium-liquids', solve('A(l) = B(l)'), 'ideal liquid'],
@@ -115,6 +136,11 @@ const MEDIUM: readonly ErrorCase[] = [
     'pressure bar',
   ],
   ['constant-too-large', '=K.FROM.GIBBS(-100000, 10)', 'ln K'],
+  [
+    'restate-rows',
+    '=K.RESTATE(2, "A(g) = 2 B(g)", "activity", "pressure atm", CONDITIONS.TABLE("K written as", "ln K", ""))',
+    'K written as',
+  ],
   ['restate-terms', '=K.RESTATE(2, "A(g) = 2 B(g)", "activity", "fugacity")', 'fugacity'],
 ];
 
@@ -129,9 +155,11 @@ const ANSWERS: readonly ErrorCase[] = [
     '=REACTION.FORWARD.PROBABILITY("A = B", 2, {1;1}, CONDITIONS.TABLE("medium", "as given", ""))',
     'K uncertainty',
   ],
+  ['problem-unfit', '=REACTION.QUOTIENT("A = B", {1E-300;1})', 'amount of A'],
   ['not-solved', '=EXTENT.SOLVE("A = B", 2, {1E-300;1})', 'refused'],
   ['extent-infeasible', '=COMPOSITION.AT.EXTENT("A = B", {1;1}, 2)', '2'],
   ['evidence-item', '=EXTENT.EVIDENCE("A = B", 2, {1;1}, , "colour")', 'colour'],
+  ['phase-unknown-line', '=COMPOSITION.FRACTIONS(A1:B2, , "g")', 'row 1 (A)', rows(['A', 1], ['B(g)', 1])],
   ['phase-word', '=COMPOSITION.FRACTIONS(A1:B2, , "gas")', 'gas', rows(['A', 1], ['B', 1])],
   ['left-out-missing', '=COMPOSITION.FRACTIONS(A1:B2, "H2O")', 'H2O', rows(['A', 1], ['B', 1])],
   ['fractions-nothing', '=COMPOSITION.FRACTIONS(A1:B2)', 'amounts', rows(['A', 0], ['B', 0])],

@@ -1,5 +1,6 @@
 import { defineFunction } from '../entry.ts';
 import { AMOUNTS, CONDITIONS, CONSTANT, EQUATION } from '../parameters/common.ts';
+import { unitOfAll } from '../problem/basis.ts';
 import { amountInLine, solved } from '../problem/solved.ts';
 import { alignedWith } from '../reading/amounts.ts';
 import { alignedShape } from '../reading/lines.ts';
@@ -40,8 +41,6 @@ export const compositionAtEquilibrium = defineFunction({
     const value = alignedWith(given.amounts.form, 'at equilibrium', (position) =>
       amountInLine(setup, outcome.amounts, position),
     );
-    const { unitText } = setup.fed;
-    const isOneUnit = given.amounts.form.lines.every(({ unit }) => unit?.text === unitText);
-    return { value, unit: isOneUnit ? unitText : null, outcome };
+    return { value, unit: unitOfAll(given.amounts.form), outcome };
   },
 });

@@ -3,6 +3,7 @@ import { inputError } from '../../errors.ts';
 import { defineFunction } from '../entry.ts';
 import { AMOUNTS, EQUATION } from '../parameters/common.ts';
 import { number } from '../parameters/number.ts';
+import { unitOfAll } from '../problem/basis.ts';
 import { feedOf } from '../problem/feed.ts';
 import { amountInLine } from '../problem/solved.ts';
 import { alignedWith } from '../reading/amounts.ts';
@@ -39,6 +40,6 @@ export const compositionAtExtent = defineFunction({
     const value = alignedWith(amounts.form, 'at this extent', (position) =>
       amountInLine({ fed, table: amounts }, found, position),
     );
-    return { value };
+    return { value, unit: unitOfAll(amounts.form) };
   },
 });

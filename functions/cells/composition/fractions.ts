@@ -11,7 +11,7 @@ import { commonBasis } from '../problem/basis.ts';
 import { negativeAmount } from '../problem/feed.ts';
 import { type AmountsTable, alignedWith } from '../reading/amounts.ts';
 import { alignedShape } from '../reading/lines.ts';
-import { linePlace } from '../reading/tableForm.ts';
+import { linePlace, type TableForm } from '../reading/tableForm.ts';
 
 const PHASES = ['g', 'l', 's', 'aq'];
 
@@ -52,6 +52,7 @@ export const compositionFractions = defineFunction({
         () => parseSpecies(line.species),
       ),
     );
+    refuseUnclear(form, species, phase);
     const omitted = leftOut.map((label) => omittedText(label, species));
     const isCounted = species.map(
       ({ text, phase: tag }) => !omitted.includes(text) && (phase === undefined || tag === phase),
@@ -69,6 +70,22 @@ export const compositionFractions = defineFunction({
     };
   },
 });
+
+/** A species on two lines, a bare per cent of what is no gas, or an untagged line where a phase is asked for. */
+function refuseUnclear(form: TableForm, species: readonly Species[], phase: string | undefined): void {
+  species.forEach(({ text, phase: tag }, position) => {
+    const line = form.lines[position]!;
+    const place = linePlace(form, line);
+    const first = species.findIndex((other) => other.text === text);
+    if (first !== position) {
+      throw inputError('amounts-twice', { place, first: linePlace(form, form.lines[first]!) });
+    }
+    if (line.unit?.quantity === 'fraction' && tag !== 'g') {
+      throw inputError('amounts-fraction', { place, unit: line.unit.text });
+    }
+    if (phase !== undefined && tag === null) throw inputError('phase-unknown-line', { place });
+  });
+}
 
 /** The canonical text of a species that is left out; one that has no line is an error. */
 function omittedText(label: string, all: readonly Species[]): string {

@@ -33,6 +33,8 @@ export const kRestate = defineFunction({
     },
   ],
   run({ K, equation, from, to, conditions = NO_CONDITIONS }) {
+    const row = (['K written as', 'K in terms of'] as const).find((name) => conditions.rows.has(name));
+    if (row !== undefined) throw inputError('restate-rows', { row });
     const setting = constantSetting(equation, conditions);
     const inTerms = (words: string, argument: string): number =>
       setting.change * lnReference(setting, withTerms(conditions, words, argument), null);
@@ -44,8 +46,9 @@ export const kRestate = defineFunction({
 
 /** The conditions with a row `K in terms of` for words such as `pressure bar`. */
 function withTerms(conditions: Conditions, words: string, argument: string): Conditions {
+  const lowerCase = words.toLowerCase();
   const value = CONDITION_RULES['K in terms of'].words.find(
-    (term) => words === term || words.startsWith(`${term} `),
+    (term) => lowerCase === term || lowerCase.startsWith(`${term} `),
   );
   if (value === undefined) throw inputError('restate-terms', { argument, given: words });
   const unitText = words.slice(value.length).trim();

@@ -1,4 +1,5 @@
 import { matchSpecies } from '../../chemistry/match.ts';
+import { firstToRunOut } from '../../equilibrium/limits.ts';
 import { inputError } from '../../errors.ts';
 import { defineFunction } from '../entry.ts';
 import { AMOUNTS, CONDITIONS, CONSTANT, EQUATION } from '../parameters/common.ts';
@@ -40,10 +41,7 @@ export const conversionAtEquilibrium = defineFunction({
 
 /** The reactant with the least amount for its stoichiometric number. */
 function firstReactant({ problem: { stoichiometry, feed }, reaction }: ExtentSetup): number {
-  let first = 0;
-  for (let i = 1; i < reaction.reactantCount; i++) {
-    if (feed[i]! * stoichiometry[first]! > feed[first]! * stoichiometry[i]!) first = i;
-  }
+  const first = firstToRunOut(stoichiometry, feed, 'reactants');
   if (!(feed[first]! > 0))
     throw inputError('conversion-nothing-fed', { species: reaction.species[first]!.text });
   return first;

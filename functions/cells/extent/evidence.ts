@@ -2,7 +2,9 @@ import { type CellScalar, defineFunction } from '../entry.ts';
 import { AMOUNTS, CONDITIONS, CONSTANT, EQUATION } from '../parameters/common.ts';
 import { optional } from '../parameters/optional.ts';
 import { text } from '../parameters/text.ts';
+import { hasAnswer } from '../../equilibrium/outcome.ts';
 import { evidenceShape, evidenceTable } from '../problem/evidence.ts';
+import { mixedInert } from '../problem/mixedInert.ts';
 import { attempted, type SolvedExtent } from '../problem/solved.ts';
 import { unusedConditions } from '../problem/unused.ts';
 
@@ -10,10 +12,10 @@ import { unusedConditions } from '../problem/unused.ts';
 const ITEMS: Readonly<Record<string, (solved: SolvedExtent) => CellScalar>> = {
   status: ({ outcome }) => outcome.status,
   reason: ({ outcome }) => outcome.reason,
-  extent: ({ outcome }) => outcome.extent,
+  extent: ({ outcome }) => (hasAnswer(outcome) ? outcome.extent : null),
   unit: ({ setup }) => setup.fed.unitText,
-  'lowest extent': ({ outcome }) => outcome.limits[0],
-  'highest extent': ({ outcome }) => outcome.limits[1],
+  'lowest extent': ({ outcome }) => (hasAnswer(outcome) ? outcome.limits[0] : null),
+  'highest extent': ({ outcome }) => (hasAnswer(outcome) ? outcome.limits[1] : null),
   'residual in ln units': ({ outcome }) => outcome.residual,
   'error bound in ln units': ({ outcome }) => outcome.errorBound,
   'limiting species': ({ setup, outcome: { limiting } }) =>
@@ -21,6 +23,12 @@ const ITEMS: Readonly<Record<string, (solved: SolvedExtent) => CellScalar>> = {
   'inert species': ({ setup: { fed } }) =>
     listed(fed.inert.map(({ position }) => fed.form.lines[position]!.species)),
   medium: ({ setup }) => setup.setting.medium,
+  'inert species mixed in it': ({ setup: { fed, setting } }) =>
+    listed(
+      setting.isFraction
+        ? mixedInert(fed, setting.medium).map(({ position }) => fed.form.lines[position]!.species)
+        : [],
+    ),
   'ln K used': ({ setup }) => setup.problem.lnK,
   'element check': ({ setup }) => elementCheck(setup.reaction.named),
   'conditions not needed': ({ setup }) => listed(unusedConditions(setup)),

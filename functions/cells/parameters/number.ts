@@ -1,5 +1,5 @@
 import { inputError } from '../../errors.ts';
-import type { Parameter } from '../entry.ts';
+import type { CellValue, Parameter } from '../entry.ts';
 import { describe } from './describe.ts';
 
 /** A number from one cell. A text that looks like a number, a truth value and a blank are errors. */
@@ -9,7 +9,7 @@ export function number(summary: string): Parameter<number> {
     isOptional: false,
     read(given, argument) {
       if (typeof given === 'number' && Number.isFinite(given)) return given;
-      throw inputError('argument-kind', { argument, given: describe(given), wanted: 'a number' });
+      throw notANumber(given, argument, 'a number');
     },
   };
 }
@@ -21,11 +21,18 @@ export function positiveNumber(summary: string): Parameter<number> {
     isOptional: false,
     read(given, argument) {
       if (typeof given === 'number' && given > 0 && Number.isFinite(given)) return given;
-      throw inputError('argument-kind', {
-        argument,
-        given: describe(given),
-        wanted: 'a number greater than 0',
-      });
+      throw notANumber(given, argument, 'a number greater than 0');
     },
   };
+}
+
+const DECIMAL_COMMA = /^\s*-?\d+,\d+(?:[eE]-?\d+)?\s*$/;
+
+function notANumber(given: CellValue, argument: string, wanted: string) {
+  const hasComma = typeof given === 'string' && DECIMAL_COMMA.test(given);
+  return inputError('argument-kind', {
+    argument,
+    given: describe(given),
+    wanted: hasComma ? `${wanted} with a decimal point` : wanted,
+  });
 }

@@ -8,7 +8,8 @@ export function text(summary: string): Parameter<string> {
     summary,
     isOptional: false,
     read(given, argument) {
-      if (typeof given === 'string' && given.trim() !== '') return given.trim();
+      const words = typeof given === 'string' ? given.trim() : '';
+      if (words !== '') return words;
       throw inputError('argument-kind', { argument, given: describe(given), wanted: 'a text' });
     },
   };

@@ -1,13 +1,39 @@
 /**
  * The reduced affinity ln(K/Q) of a mixture as fed, and its standard uncertainty.
  */
+import type { CheckedReaction } from '../../chemistry/balancedEquation.ts';
 import { convertDifference } from '../../chemistry/units/convert.ts';
 import { readUnit } from '../../chemistry/units/readUnit.ts';
+import { flawOf } from '../../equilibrium/extentProblem.ts';
 import { reactionQuotient } from '../../equilibrium/quotient.ts';
 import { inputError } from '../../errors.ts';
+import type { AmountsTable } from '../reading/amounts.ts';
+import type { ConditionName } from '../reading/conditionRows.ts';
 import type { Conditions } from '../reading/conditions.ts';
-import type { ExtentSetup } from './extentSetup.ts';
+import { type ExtentSetup, extentSetup } from './extentSetup.ts';
+import { negativeAmount } from './feed.ts';
+import { mixedInert } from './mixedInert.ts';
 import { pressureBar, temperatureK, volumeL } from './state.ts';
+
+/**
+ * The set-up of a mixture that is only looked at, not worked: nothing may be taken out of it, and it
+ * must be a problem that makes sense.
+ *
+ * Errors: those of `extentSetup`, `amounts-negative`, `problem-unfit`.
+ */
+export function mixtureSetup(
+  reaction: CheckedReaction,
+  lnK: number,
+  table: AmountsTable,
+  conditions: Conditions | undefined,
+): ExtentSetup {
+  const setup = extentSetup(reaction, lnK, table, conditions);
+  const negative = table.amounts.findIndex((amount) => amount < 0);
+  if (negative !== -1) throw negativeAmount(table, negative);
+  const reason = flawOf(setup.problem);
+  if (reason !== '') throw inputError('problem-unfit', { reason });
+  return setup;
+}
 
 /**
  * ln(K/Q), positive where the reaction runs forward.
@@ -55,9 +81,10 @@ function amountContributions({ problem, fed, setting, table }: ExtentSetup): num
     const u = table.uncertainties[position] ?? null;
     return u === null || !mixed[i] ? [] : (stoichiometry[i]! / feed[i]! - byTotal) * u * fed.factors[i]!;
   });
-  const others = fed.inert.flatMap(({ position, factor }) => {
+  const counted = isFraction && change !== 0 ? mixedInert(fed, setting.medium) : [];
+  const others = counted.flatMap(({ position, factor }) => {
     const u = table.uncertainties[position] ?? null;
-    return u === null || byTotal === 0 ? [] : byTotal * u * factor();
+    return u === null ? [] : byTotal * u * factor();
   });
   return [...reacting, ...others];
 }
@@ -77,34 +104,30 @@ function conditionContributions({ setting, fed, conditions }: ExtentSetup): numb
       one(isGas && terms === 'concentration') - one(isGas && !isFraction && fed.basis !== 'pressure'),
     volume: one(!isFraction && fed.basis === 'amount'),
   };
-  return (['pressure', 'temperature', 'volume'] as const).flatMap((name) => {
-    if (exponents[name] === 0) return [];
-    const relative = RELATIVE[name](conditions);
-    return relative === null ? [] : change * exponents[name] * relative;
-  });
+  return [
+    ...relative(exponents.pressure, conditions, ['pressure', 'barometer'], 'bar', pressureBar),
+    ...relative(exponents.temperature, conditions, ['temperature'], 'K', temperatureK),
+    ...relative(exponents.volume, conditions, ['volume'], 'L', volumeL),
+  ].map((u) => change * u);
 }
 
 function one(isSo: boolean): number {
   return isSo ? 1 : 0;
 }
 
-const PURPOSE = 'its uncertainty';
-
-/** The relative standard uncertainty of each condition that may enter. */
-const RELATIVE = {
-  pressure: (given: Conditions) => relative(given, 'pressure', 'bar', pressureBar),
-  temperature: (given: Conditions) => relative(given, 'temperature', 'K', temperatureK),
-  volume: (given: Conditions) => relative(given, 'volume', 'L', volumeL),
-};
-
+/** The relative standard uncertainties of a quantity, times its exponent, from the rows that make it up. */
 function relative(
+  exponent: number,
   conditions: Conditions,
-  name: 'pressure' | 'temperature' | 'volume',
+  names: readonly ConditionName[],
   unit: string,
   valueOf: (conditions: Conditions, purpose: string) => number,
-): number | null {
-  const row = conditions.rows.get(name);
-  if (row === undefined || row.uncertainty === null || row.unit === null) return null;
-  const base = row.unit.quantity === 'gauge pressure' ? 'bar gauge' : unit;
-  return convertDifference(row.uncertainty, row.unit, readUnit(base)) / valueOf(conditions, PURPOSE);
+): number[] {
+  if (exponent === 0) return [];
+  return names.flatMap((name) => {
+    const row = conditions.rows.get(name);
+    if (!row?.unit || row.uncertainty === null) return [];
+    const u = convertDifference(row.uncertainty, row.unit, readUnit(unit));
+    return (exponent * u) / valueOf(conditions, 'its uncertainty');
+  });
 }

@@ -43,6 +43,12 @@ export function commonBasis(lines: readonly FormLine[], form: TableForm): Basis 
   return basis;
 }
 
+/** The one unit that all lines have; null where they have several, or none. */
+export function unitOfAll({ lines }: TableForm): string | null {
+  const text = lines[0]?.unit?.text ?? null;
+  return lines.every(({ unit }) => unit?.text === text) ? text : null;
+}
+
 /** The unit of a line in words. */
 export function unitText({ unit }: FormLine): string {
   return unit?.text ?? 'no unit';

@@ -48,6 +48,9 @@ export function lnReference(
   const { value: terms, unit } = row;
   const basis = `${terms}${unit === null ? '' : ` ${unit.text}`}`;
   const refuse = (reason: string) => inputError('constant-basis', { basis, medium, reason });
+  if (unit !== null && terms !== 'activity' && unit.quantity !== terms) {
+    throw refuse(`${unit.text} is no unit of ${terms}`);
+  }
   if (change === 0) return 0;
   if (medium === 'as given') {
     if (terms === 'activity' && unit === null) return 0;
@@ -59,7 +62,6 @@ export function lnReference(
   if (terms === 'activity' && unit === null) return 0;
   if (terms === 'pressure' && unit === null) throw refuse('the unit of pressure is missing');
   if (terms === 'concentration' && unit === null) throw refuse('the unit of concentration is missing');
-  if (terms === 'mole fraction' && unit !== null) throw refuse('a mole fraction has no unit');
   switch (medium) {
     case 'gas':
       if (terms === 'mole fraction') {

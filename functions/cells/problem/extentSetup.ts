@@ -13,7 +13,8 @@ import { unitText } from './basis.ts';
 import { lnReference } from './constant.ts';
 import type { Fed } from './fed.ts';
 import { feedOf } from './feed.ts';
-import { countsInMedium, type Setting, settingOf } from './medium.ts';
+import { type Setting, settingOf } from './medium.ts';
+import { mixedInert } from './mixedInert.ts';
 import { pressureBar, temperatureK, volumeL } from './state.ts';
 
 export interface ExtentSetup {
@@ -42,6 +43,8 @@ export function extentSetup(
   const { fed, feed } = feedOf(reaction, table, conditions.rows.has('removal'));
   checkInert(reaction, conditions, fed);
   checkAsGiven(setting, fed);
+  checkFractions(setting, fed, reaction);
+  checkDissolved(setting, fed, reaction, conditions);
   const { change, mixed, isFraction } = setting;
   const lnBasisShift = change === 0 ? 0 : change * lnReference(setting, conditions, fed.reference);
   const problem: ExtentProblem = {
@@ -79,12 +82,9 @@ function lnScale({ medium, isFraction }: Setting, fed: Fed, conditions: Conditio
   throw wrongBasis(fed, 'a solution', 'mol/L, or mol with a volume row');
 }
 
-/** Inert species count where activities are fractions of all that is mixed. */
-function inertAmount({ medium }: Setting, { inert }: Fed, { amounts }: AmountsTable): number {
+function inertAmount({ medium }: Setting, fed: Fed, { amounts }: AmountsTable): number {
   let sum = 0;
-  for (const { position, species, factor } of inert) {
-    if (countsInMedium(species(), medium)) sum += amounts[position]! * factor();
-  }
+  for (const { position, factor } of mixedInert(fed, medium)) sum += amounts[position]! * factor();
   return sum;
 }
 
@@ -97,6 +97,33 @@ function checkAsGiven({ medium, mixed, change }: Setting, { form, factors, react
   throw inputError('amounts-as-given', { place: linePlace(form, line), unit: unitText(line) });
 }
 
+/** A bare `%` or `ppm` is common for the moles of a gas; of a liquid or a solute it may mean mass. */
+function checkFractions({ medium }: Setting, { form, reacting }: Fed, { species }: CheckedReaction): void {
+  if (medium === 'gas') return;
+  reacting.forEach((position, i) => {
+    const line = form.lines[position]!;
+    if (line.unit?.quantity !== 'fraction' || species[i]!.phase === 'g') return;
+    throw inputError('amounts-fraction', { place: linePlace(form, line), unit: line.unit.text });
+  });
+}
+
+/** Constants of dissolved species are stated in mol/L; with amounts as given in mmol/L one of the two is meant. */
+function checkDissolved(
+  { medium, mixed, change }: Setting,
+  { form, reacting, reference }: Fed,
+  { species }: CheckedReaction,
+  { rows }: Conditions,
+): void {
+  if (medium !== 'as given' || rows.has('medium') || rows.has('K in terms of') || change === 0) return;
+  if (reference === null || DISSOLVED_UNITS.includes(reference.text)) return;
+  const dissolved = species.findIndex(({ phase }, i) => phase === 'aq' && mixed[i]);
+  if (dissolved === -1) return;
+  const line = form.lines[reacting[dissolved]!]!;
+  throw inputError('amounts-dissolved', { place: linePlace(form, line), unit: reference.text });
+}
+
+const DISSOLVED_UNITS = ['mol/L', 'mol/kg'];
+
 /** A species named as inert must be fed and must not stand in the equation. */
 function checkInert(reaction: CheckedReaction, conditions: Conditions, { form, inert }: Fed): void {
   for (const name of conditions.inert) {
@@ -106,6 +133,6 @@ function checkInert(reaction: CheckedReaction, conditions: Conditions, { form, i
   }
 }
 
-function wrongBasis({ reference }: Fed, medium: string, wanted: string) {
-  return inputError('amounts-basis', { unit: reference?.text ?? 'no common unit', medium, wanted });
+function wrongBasis({ unitText: unit }: Fed, medium: string, wanted: string) {
+  return inputError('amounts-basis', { unit: unit ?? 'no unit', medium, wanted });
 }

@@ -35,7 +35,8 @@ const PHASES: Readonly<Record<Medium, { mixed: readonly string[]; pure: readonly
 /**
  * The medium of a reaction under these conditions.
  *
- * Errors: `medium-contradiction` (rows or tags that exclude one another), `medium-tags-forgotten` (a
+ * Errors: `medium-two-rows` (pressure and volume), `medium-as-given` and `medium-phase` (rows or tags that exclude the
+ * medium), `medium-tags-forgotten` (a
  * pressure or a volume that nothing uses), `medium-missing` (a gas reaction without pressure or
  * volume), `medium-liquids` (several liquids, mixed or not), `medium-untagged`.
  */
@@ -57,16 +58,12 @@ function chosenSetting(reaction: Reaction, conditions: Conditions): Setting {
   const hasGas = reaction.species.some(({ phase }) => phase === 'g');
   const medium = stated ?? (hasGas && (hasPressure || hasVolume) ? 'gas' : 'as given');
   if (medium === 'gas' && hasPressure && hasVolume) {
-    throw inputError('medium-contradiction', {
-      what: 'a gas has both a pressure row and a volume row',
-      mend: 'Keep the one that stays constant while the reaction runs',
-    });
+    throw inputError('medium-two-rows', { equation: reaction.text });
   }
   if (medium === 'as given' && (hasPressure || hasVolume)) {
-    throw inputError('medium-tags-forgotten', {
-      row: hasPressure ? 'pressure' : 'volume',
-      equation: reaction.text,
-    });
+    const row = hasPressure ? 'pressure' : 'volume';
+    if (stated === undefined) throw inputError('medium-tags-forgotten', { row, equation: reaction.text });
+    throw inputError('medium-as-given', { row });
   }
   const setting = settingIn(medium, stated, reaction, hasVolume);
   checkGas(reaction, medium, stated, hasPressure || hasVolume);
@@ -114,10 +111,7 @@ function isMixed(species: Species, medium: Medium, stated: Medium | undefined, r
   }
   if (PHASES[medium].mixed.includes(tag)) return true;
   if (!PHASES[medium].pure.includes(tag)) {
-    throw inputError('medium-contradiction', {
-      what: `${species.text} is no part of the medium ${medium}, nor a pure phase beside it`,
-      mend: 'Change the medium row or the phase tag; REACTION.QUOTIENT takes activities of several phases with medium | as given',
-    });
+    throw inputError('medium-phase', { species: species.text, medium });
   }
   const isSeveralLiquids = tag === 'l' && reaction.species.filter(({ phase }) => phase === 'l').length > 1;
   if (medium === 'as given' && isSeveralLiquids)

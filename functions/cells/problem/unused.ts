@@ -8,7 +8,6 @@ import type { ExtentSetup } from './extentSetup.ts';
 /** Rows that state what the calculation goes by, whatever it is. */
 const ALWAYS_USED: readonly ConditionName[] = [
   'medium',
-  'K in terms of',
   'K written as',
   'removal',
   'activity model',
@@ -19,10 +18,11 @@ export function unusedConditions({ conditions: { rows }, setting, fed }: ExtentS
   const used = new Set<ConditionName>(ALWAYS_USED);
   const { medium, change, isFraction } = setting;
   const terms = rows.get('K in terms of')?.value;
+  if (change !== 0) used.add('K in terms of');
+  // These two choose how a gas is taken, also where their value cancels.
+  if (medium === 'gas') used.add('pressure').add('volume');
   if (change !== 0 && medium === 'gas') {
-    if (isFraction || terms === 'mole fraction') used.add('pressure');
     if (terms === 'concentration' || (!isFraction && fed.basis !== 'pressure')) used.add('temperature');
-    if (!isFraction && fed.basis === 'amount') used.add('volume');
   }
   if (change !== 0 && medium === 'solution' && fed.basis === 'amount') used.add('volume');
   if (used.has('pressure') && rows.get('pressure')?.unit?.quantity === 'gauge pressure')

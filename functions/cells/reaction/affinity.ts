@@ -1,9 +1,8 @@
 import { GAS_CONSTANT } from '../../data/constants.ts';
 import { defineFunction } from '../entry.ts';
 import { AMOUNTS, CONSTANT, EQUATION, NEEDED_CONDITIONS } from '../parameters/common.ts';
-import { reducedAffinity } from '../problem/affinity.ts';
+import { mixtureSetup, reducedAffinity } from '../problem/affinity.ts';
 import { statedLnK } from '../problem/constant.ts';
-import { extentSetup } from '../problem/extentSetup.ts';
 import { temperatureK } from '../problem/state.ts';
 
 const JOULE_PER_KILOJOULE = 1000;
@@ -25,7 +24,7 @@ export const reactionAffinity = defineFunction({
     },
   ],
   run({ equation, K, amounts, conditions }) {
-    const setup = extentSetup(equation, statedLnK(K, conditions), amounts, conditions);
+    const setup = mixtureSetup(equation, statedLnK(K, conditions), amounts, conditions);
     const RT = GAS_CONSTANT * temperatureK(conditions, 'an affinity');
     return { value: (RT * reducedAffinity(setup)) / JOULE_PER_KILOJOULE, unit: 'kJ/mol' };
   },

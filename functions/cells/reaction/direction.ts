@@ -2,9 +2,8 @@ import { direction } from '../../equilibrium/quotient.ts';
 import { inputError } from '../../errors.ts';
 import { defineFunction } from '../entry.ts';
 import { AMOUNTS, CONDITIONS, CONSTANT, EQUATION } from '../parameters/common.ts';
-import { affinityUncertainty, reducedAffinity } from '../problem/affinity.ts';
+import { affinityUncertainty, mixtureSetup, reducedAffinity } from '../problem/affinity.ts';
 import { statedLnK } from '../problem/constant.ts';
-import { extentSetup } from '../problem/extentSetup.ts';
 
 /** Half-width of a 95 % interval in standard uncertainties (JCGM 100:2008, table G.1, normal distribution). */
 const COVERAGE_95 = 1.96;
@@ -28,7 +27,7 @@ export const reactionDirection = defineFunction({
     },
   ],
   run({ equation, K, amounts, conditions }) {
-    const setup = extentSetup(equation, statedLnK(K, conditions), amounts, conditions);
+    const setup = mixtureSetup(equation, statedLnK(K, conditions), amounts, conditions);
     const found = direction(setup.problem);
     if (found === 'blocked') throw inputError('reaction-blocked', { equation: equation.text });
     const isAffinityFinite = setup.problem.feed.every((n, i) => n > 0 || !setup.problem.mixed[i]);

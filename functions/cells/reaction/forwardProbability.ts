@@ -2,9 +2,8 @@ import { inputError } from '../../errors.ts';
 import { normalProbability } from '../problem/normalProbability.ts';
 import { defineFunction } from '../entry.ts';
 import { AMOUNTS, CONSTANT, EQUATION, NEEDED_CONDITIONS } from '../parameters/common.ts';
-import { affinityUncertainty, reducedAffinity } from '../problem/affinity.ts';
+import { affinityUncertainty, mixtureSetup, reducedAffinity } from '../problem/affinity.ts';
 import { statedLnK } from '../problem/constant.ts';
-import { extentSetup } from '../problem/extentSetup.ts';
 
 export const reactionForwardProbability = defineFunction({
   name: 'REACTION.FORWARD.PROBABILITY',
@@ -24,7 +23,7 @@ export const reactionForwardProbability = defineFunction({
     },
   ],
   run({ equation, K, amounts, conditions }) {
-    const setup = extentSetup(equation, statedLnK(K, conditions), amounts, conditions);
+    const setup = mixtureSetup(equation, statedLnK(K, conditions), amounts, conditions);
     const u = affinityUncertainty(setup);
     if (u === null || u === 0) throw inputError('uncertainty-missing', {});
     return { value: normalProbability(reducedAffinity(setup) / u) };

@@ -2,7 +2,7 @@ import { reactionQuotient } from '../../equilibrium/quotient.ts';
 import { inputError } from '../../errors.ts';
 import { defineFunction } from '../entry.ts';
 import { AMOUNTS, CONDITIONS, EQUATION } from '../parameters/common.ts';
-import { extentSetup } from '../problem/extentSetup.ts';
+import { mixtureSetup } from '../problem/affinity.ts';
 import { isHoldable } from '../problem/holdable.ts';
 
 export const reactionQuotientOf = defineFunction({
@@ -35,7 +35,7 @@ export const reactionQuotientOf = defineFunction({
     },
   ],
   run({ equation, amounts, conditions }) {
-    const { problem, lnBasisShift } = extentSetup(equation, 0, amounts, conditions);
+    const { problem, lnBasisShift } = mixtureSetup(equation, 0, amounts, conditions);
     const { lnQ, absentReactants, absentProducts } = reactionQuotient(problem);
     if (lnQ !== null) {
       const lnStated = lnQ - lnBasisShift;

@@ -1,8 +1,7 @@
 import { defineFunction } from '../entry.ts';
 import { AMOUNTS, CONDITIONS, CONSTANT, EQUATION } from '../parameters/common.ts';
-import { reducedAffinity } from '../problem/affinity.ts';
+import { mixtureSetup, reducedAffinity } from '../problem/affinity.ts';
 import { statedLnK } from '../problem/constant.ts';
-import { extentSetup } from '../problem/extentSetup.ts';
 
 export const reactionReducedAffinity = defineFunction({
   name: 'REACTION.REDUCED.AFFINITY',
@@ -18,7 +17,7 @@ export const reactionReducedAffinity = defineFunction({
     },
   ],
   run({ equation, K, amounts, conditions }) {
-    const setup = extentSetup(equation, statedLnK(K, conditions), amounts, conditions);
+    const setup = mixtureSetup(equation, statedLnK(K, conditions), amounts, conditions);
     return { value: reducedAffinity(setup) };
   },
 });

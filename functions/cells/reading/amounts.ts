@@ -50,12 +50,13 @@ function readAmounts(given: CellValue, argument: string): AmountsTable {
   if (lines[0]!.length > WIDEST_LINE) throw wrongTable(given, argument);
   const form = labelledForm(lines, lies);
   checkUnlabelled(form, lines);
-  const values: number[] = [];
-  const uncertainties: (number | null)[] = [];
-  for (let i = 0; i < form.lines.length; i++) {
+  const count = form.lines.length;
+  const values = new Array<number>(count);
+  const uncertainties = new Array<number | null>(count);
+  for (let i = 0; i < count; i++) {
     const line = lines[form.lines[i]!.index]!;
-    values.push(readAmount(line[1]!, form, i));
-    uncertainties.push(readUncertainty(line[3], form, i));
+    values[i] = readAmount(line[1]!, form, i);
+    uncertainties[i] = readUncertainty(line[3], form, i);
   }
   return { form, amounts: values, uncertainties };
 }

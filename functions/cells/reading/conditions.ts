@@ -17,7 +17,9 @@ import {
   type ConditionRule,
   conditionName,
 } from './conditionRows.ts';
+import { coverageFactorUnder } from './heading.ts';
 import { isHeadingWord } from './lines.ts';
+import { isBlank } from './tableForm.ts';
 
 export interface Condition {
   /** Place in the table, counted from 1. */
@@ -54,10 +56,11 @@ function readConditions(given: unknown, argument: string): Conditions {
   const rows = new Map<ConditionName, Condition>();
   const uncertainties: { of: ConditionName; row: number; line: readonly CellScalar[] }[] = [];
   const inert: string[] = [];
+  const hasHeading = isHeadingWord(table[0]![0]!, 'quantity');
+  const coverageFactor = hasHeading ? coverageFactorUnder(table[0]!, argument) : 1;
   table.forEach((line, index) => {
     const row = index + 1;
-    if (line.every((cell) => cell === null || cell === '')) return;
-    if (index === 0 && isHeadingWord(line[0]!, 'quantity')) return;
+    if (isBlank(line) || (hasHeading && index === 0)) return;
     const title = typeof line[0] === 'string' ? line[0] : '';
     const name = conditionName(title);
     if (name === undefined) {
@@ -66,7 +69,7 @@ function readConditions(given: unknown, argument: string): Conditions {
       uncertainties.push({ of, row, line });
       return;
     }
-    const condition = readRow(name, line, `${argument} row ${row} (${name})`, row);
+    const condition = readRow(name, line, `${argument} row ${row} (${name})`, row, coverageFactor);
     if (name === 'inert') {
       inert.push(condition.value as string);
       return;
@@ -80,14 +83,20 @@ function readConditions(given: unknown, argument: string): Conditions {
   return { rows, inert };
 }
 
-function readRow(name: ConditionName, line: readonly CellScalar[], place: string, row: number): Condition {
+function readRow(
+  name: ConditionName,
+  line: readonly CellScalar[],
+  place: string,
+  row: number,
+  coverageFactor: number,
+): Condition {
   const rule: ConditionRule = CONDITION_RULES[name];
   const value = readValue(rule, line[1]!, place);
   const unit = readConditionUnit(rule, line[2] ?? null, place);
   refuseImpossible(rule, value, unit, place);
   if (line[3] === undefined || line[3] === null || line[3] === '')
     return { row, value, unit, uncertainty: null };
-  return { row, value, unit, uncertainty: readUncertainty(rule, line[3], place) };
+  return { row, value, unit, uncertainty: readUncertainty(rule, line[3], place) / coverageFactor };
 }
 
 function readValue(rule: ConditionRule, cell: CellScalar, place: string): number | string {
@@ -121,7 +130,10 @@ function refuseImpossible(
   if (typeof value !== 'number' || unit?.quantity === 'gauge pressure') return;
   const isPossible = unit === null ? value >= 0 : toBase(value, unit) > 0;
   if (isPossible) return;
-  const wanted = rule.holds === 'number' ? `a ${rule.quantities[0]} above nothing` : 'a number of 0 or more';
+  const wanted =
+    rule.holds === 'number'
+      ? `a ${rule.quantities[0]} above ${rule.quantities[0] === 'temperature' ? 'absolute zero' : '0'}`
+      : 'a number of 0 or more';
   throw inputError('condition-value', { place, given: `${value} ${unit?.text ?? ''}`.trimEnd(), wanted });
 }
 

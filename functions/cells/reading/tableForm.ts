@@ -9,6 +9,7 @@ import type { Unit } from '../../chemistry/units/unit.ts';
 import { at, inputError } from '../../errors.ts';
 import type { CellScalar } from '../entry.ts';
 import { describe } from '../parameters/describe.ts';
+import { coverageFactorUnder } from './heading.ts';
 import { isHeadingWord } from './lines.ts';
 
 export interface FormLine {
@@ -36,6 +37,9 @@ const CAPACITY = 500;
 const labelledForms = new Map<string, TableForm>();
 const bareForms = new Map<string, TableForm>();
 
+/** The form that was asked for last; most often the next table has the same words. */
+let latest: { readonly form: TableForm; readonly words: readonly (CellScalar | undefined)[] } | undefined;
+
 type Line = readonly CellScalar[];
 
 /** Where a line stands, for a message: `amounts row 3 (NH3)`. */
@@ -50,16 +54,34 @@ export function linePlace(
 /**
  * The form of a labelled table from its lines.
  *
- * Errors: `amounts-species`, `amounts-unit`, `amounts-heading`, `unit-unknown`; each names the line.
+ * Errors: `amounts-species`, `amounts-unit`, those of the heading, `unit-unknown`; each names the line.
  */
 export function labelledForm(lines: readonly Line[], lies: 'down' | 'across'): TableForm {
-  let key: string = lies;
-  for (const line of lines) {
-    key += `\n${wordOf(line[0])}\t${wordOf(line[2])}`;
+  if (latest !== undefined && isWordedAs(latest, lines, lies)) return latest.form;
+  const words = wordsOf(lines);
+  const form = remembered(labelledForms, JSON.stringify([lies, words]), () => readForm(lines, lies));
+  latest = { form, words };
+  return form;
+}
+
+/** All that a form is read from: two words of each line, and the rest of the heading. */
+function wordsOf(lines: readonly Line[]): (CellScalar | undefined)[] {
+  const words = lines.flatMap((line) => [line[0], line[2]]);
+  if (isHeadingWord(lines[0]![0]!, 'species')) words.push(lines[0]![1], lines[0]![3]);
+  return words;
+}
+
+/** Whether the lines have the words that a form was read from. */
+function isWordedAs(
+  { form, words }: NonNullable<typeof latest>,
+  lines: readonly Line[],
+  lies: TableForm['lies'],
+): boolean {
+  if (form.lies !== lies || form.length !== lines.length) return false;
+  for (let i = 0; i < lines.length; i++) {
+    if (lines[i]![0] !== words[2 * i] || lines[i]![2] !== words[2 * i + 1]) return false;
   }
-  const heading = lines[0]![3];
-  if (typeof heading === 'string') key += `\n${heading}`;
-  return remembered(labelledForms, key, () => readForm(lines, lies));
+  return !form.hasHeading || (lines[0]![1] === words.at(-2) && lines[0]![3] === words.at(-1));
 }
 
 /** The form of a bare row or column of numbers. */
@@ -83,11 +105,6 @@ function remembered(forms: Map<string, TableForm>, key: string, read: () => Tabl
   return form;
 }
 
-/** A cell that should hold a word, for the key; what is no word makes a form that cannot be read. */
-function wordOf(cell: CellScalar | undefined): string {
-  return typeof cell === 'string' ? cell : cell === null || cell === undefined ? '' : `\r${String(cell)}`;
-}
-
 function readForm(lines: readonly Line[], lies: 'down' | 'across'): TableForm {
   const hasHeading = isHeadingWord(lines[0]![0]!, 'species');
   const formLines: FormLine[] = [];
@@ -97,7 +114,7 @@ function readForm(lines: readonly Line[], lies: 'down' | 'across'): TableForm {
     const place = linePlace({ lies }, { index, species });
     formLines.push({ index, species, unit: readLineUnit(line[2] ?? null, place) });
   });
-  const coverageFactor = hasHeading ? readCoverageFactor(lines[0]![3] ?? null) : 1;
+  const coverageFactor = hasHeading ? coverageFactorUnder(lines[0]!, 'amounts') : 1;
   return { isLabelled: true, lies, length: lines.length, hasHeading, coverageFactor, lines: formLines };
 }
 
@@ -121,15 +138,4 @@ function readLineUnit(cell: CellScalar, place: string): Unit | null {
     );
   }
   throw inputError('amounts-unit', { place, given: describe(cell) });
-}
-
-/** The k of a heading `expanded uncertainty (k=2)`; 1 for a standard uncertainty or no heading. */
-function readCoverageFactor(heading: CellScalar): number {
-  if (heading === null || heading === '') return 1;
-  if (typeof heading === 'string') {
-    const expanded = /^\s*expanded uncertainty\s*\(\s*k\s*=\s*(\d+(?:\.\d+)?)\s*\)\s*$/i.exec(heading);
-    if (expanded !== null && Number(expanded[1]) > 0) return Number(expanded[1]);
-    if (/^\s*standard uncertainty\s*$/i.test(heading)) return 1;
-  }
-  throw inputError('amounts-heading', { given: describe(heading) });
 }

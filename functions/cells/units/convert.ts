@@ -1,4 +1,4 @@
-import { convertValue } from '../../chemistry/units/convert.ts';
+import { convertValue, toBase } from '../../chemistry/units/convert.ts';
 import { readUnit } from '../../chemistry/units/readUnit.ts';
 import type { Unit } from '../../chemistry/units/unit.ts';
 import { at, inputError } from '../../errors.ts';
@@ -34,7 +34,11 @@ export const unitsConvert = defineFunction({
   ],
   run({ value, from, to }) {
     const wanted = unitOf(to, 'to');
-    const converted = convertValue(value, unitOf(from, 'from'), wanted);
+    const given = unitOf(from, 'from');
+    if (given.quantity === 'temperature' && !(toBase(value, given) >= 0)) {
+      throw inputError('temperature-range', { argument: 'value', value: `${value} ${given.text}` });
+    }
+    const converted = convertValue(value, given, wanted);
     if (Number.isFinite(converted)) return { value: converted, unit: wanted.text };
     throw inputError('argument-kind', {
       argument: 'value',

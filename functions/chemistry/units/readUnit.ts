@@ -18,13 +18,13 @@ const FLOWS: Partial<Record<Quantity, Quantity>> = {
 };
 
 /** What people write for a unit whose spelling is too far from it to be found. */
-const MEANT: Readonly<Record<string, string>> = {
-  C: 'degC',
-  F: 'degF',
-  R: 'degR',
-  celsius: 'degC',
-  litre: 'L',
-};
+const MEANT: ReadonlyMap<string, string> = new Map([
+  ['C', 'degC'],
+  ['F', 'degF'],
+  ['R', 'degR'],
+  ['celsius', 'degC'],
+  ['litre', 'L'],
+]);
 
 /**
  * The unit that a text stands for.
@@ -43,7 +43,7 @@ export const readUnit: (text: string) => Unit = remember((written) => {
   const unit = text.length > LONGEST_UNIT ? null : find(text);
   if (unit !== null) return unit;
   const shown = text.length > LONGEST_UNIT ? `${text.slice(0, 20)}...` : text;
-  const nearest = MEANT[shown] ?? nearestSpelling(shown, TRADE_UNITS.keys());
+  const nearest = MEANT.get(shown) ?? nearestSpelling(shown, TRADE_UNITS.keys());
   throw inputError('unit-unknown', {
     unit: shown,
     suggestion: nearest === null ? '' : ` (is ${nearest} meant?)`,

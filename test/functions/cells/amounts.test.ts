@@ -228,7 +228,7 @@ describe('standard uncertainties', () => {
       ['A', 1, 'mol', 0.1],
       ['B', 1, 'mol', 0.1],
     ];
-    const message = messageFrom('amounts-heading', '=EXTENT.SOLVE("A = B", 2, A1:D3)', { A1: table });
+    const message = messageFrom('heading-uncertainty', '=EXTENT.SOLVE("A = B", 2, A1:D3)', { A1: table });
     expect(message).toContain('expanded uncertainty (k=2)');
   });
 });

@@ -43,15 +43,15 @@ describe('the medium is never guessed', () => {
       ['pressure', 1, 'bar'],
       ['volume', 1, 'L'],
     ];
-    const message = messageFrom('medium-contradiction', ...doubling('(g)', 2, 'mol', both));
+    const message = messageFrom('medium-two-rows', ...doubling('(g)', 2, 'mol', both));
     expect(message).toContain('both a pressure row and a volume row');
     const gasInLiquid = doubling('(g)', 2, 'mol', [['medium', 'ideal liquid', null]]);
-    expect(messageFrom('medium-contradiction', ...gasInLiquid)).toContain('A(g) is no part of the medium');
+    expect(messageFrom('medium-phase', ...gasInLiquid)).toContain('A(g) is neither mixed in the medium');
     const asGiven: CellTable = [
       ['medium', 'as given', null],
       ['pressure', 1, 'bar'],
     ];
-    expect(messageFrom('medium-tags-forgotten', ...doubling('(g)', 2, 'mol', asGiven))).toContain('pressure');
+    expect(messageFrom('medium-as-given', ...doubling('(g)', 2, 'mol', asGiven))).toContain('pressure');
   });
 
   it('for amounts whose unit does not fit it', () => {

@@ -8,6 +8,7 @@ import { catalogue } from '../../../functions/catalogue.ts';
 import { registerEvenkeel } from '../../../functions/plugin.ts';
 import { hostOf, INSTANT } from './hostOf.ts';
 
+const INPUT = { unit: null, min: null, max: null, uncertainty: null };
 const RAW = { licenseKey: 'gpl-v3' } as const;
 
 describe('numbers', () => {
@@ -182,6 +183,26 @@ describe('evidence', () => {
     );
     host.set({ a: -2 });
     expect(host.evaluate().formulas['S!B1']!.answers).toEqual([]);
+  });
+});
+
+describe('evidence of a call inside an argument', () => {
+  it('is renewed also where another argument has become an error', () => {
+    const inner = 'COMPOSITION.AT.EQUILIBRIUM("A + B = 2 C", K1, A1:A3)';
+    const host = hostOf(
+      {
+        A1: 1,
+        A2: 1,
+        A3: 0,
+        J1: 1,
+        K1: 4,
+        L1: `=REACTION.QUOTIENT(IF(J1=1, "A + B = 2 C", NA()), ${inner})`,
+      },
+      { inputs: ['J1', 'K1'].map((cell) => ({ ...INPUT, name: cell, cell: `S!${cell}` })) },
+    );
+    host.set({ J1: 2, K1: 9 });
+    const outcomes = host.evaluate().formulas['S!L1']!.answers.flatMap(({ outcome }) => outcome ?? []);
+    expect(outcomes.map(({ problem }) => (problem as { lnK: number }).lnK)).toEqual([Math.log(9)]);
   });
 });
 
