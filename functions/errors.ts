@@ -58,7 +58,7 @@ export function inputError<Code extends ErrorCode>(
 }
 
 /** What `read` gives; an error of the input that it throws is told with its place in front. */
-export function at<Read>(place: () => string, read: () => Read): Read {
+export function withPlace<Read>(place: () => string, read: () => Read): Read {
   try {
     return read();
   } catch (thrown) {

@@ -32,13 +32,13 @@ export const compositionAtExtent = defineFunction({
     },
   ],
   run({ equation, amounts, extent }) {
-    const { fed, feed } = feedOf(equation, amounts);
+    const { matched, feed } = feedOf(equation, amounts);
     const [lowest, highest] = extentLimits(equation.stoichiometry, feed);
     if (extent < lowest || extent > highest)
       throw inputError('extent-infeasible', { extent, lowest, highest });
     const found = amountsAtExtent(equation.stoichiometry, feed, extent);
     const value = alignedWith(amounts.form, 'at this extent', (position) =>
-      amountInLine({ fed, table: amounts }, found, position),
+      amountInLine({ matched, table: amounts }, found, position),
     );
     return { value, unit: unitOfAll(amounts.form) };
   },

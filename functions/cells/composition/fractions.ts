@@ -1,7 +1,7 @@
 import { matchSpecies } from '../../chemistry/match.ts';
 import { parseSpecies, type Species } from '../../chemistry/species.ts';
 import { molPerUnit } from '../../chemistry/units/molPerUnit.ts';
-import { at, inputError } from '../../errors.ts';
+import { inputError, withPlace } from '../../errors.ts';
 import { defineFunction } from '../entry.ts';
 import { AMOUNTS } from '../parameters/common.ts';
 import { optional } from '../parameters/optional.ts';
@@ -47,7 +47,7 @@ export const compositionFractions = defineFunction({
     const { form } = amounts;
     if (!form.isLabelled) throw inputError('amounts-unlabelled', {});
     const species = form.lines.map((line) =>
-      at(
+      withPlace(
         () => linePlace(form, line),
         () => parseSpecies(line.species),
       ),
@@ -99,7 +99,7 @@ function molesIn(table: AmountsTable, position: number, species: Species): numbe
   if (amount < 0) throw negativeAmount(table, position);
   const line = table.form.lines[position]!;
   if (line.unit === null) return amount;
-  const factor = at(
+  const factor = withPlace(
     () => linePlace(table.form, line),
     () => molPerUnit(line.unit!, species),
   );

@@ -1,5 +1,5 @@
 import { readUnit } from '../../chemistry/units/readUnit.ts';
-import { at, inputError } from '../../errors.ts';
+import { inputError, withPlace } from '../../errors.ts';
 import { defineFunction } from '../entry.ts';
 import { CONDITIONS, EQUATION } from '../parameters/common.ts';
 import { positiveNumber } from '../parameters/number.ts';
@@ -55,7 +55,7 @@ function withTerms(conditions: Conditions, words: string, argument: string): Con
   const unit =
     unitText === ''
       ? null
-      : at(
+      : withPlace(
           () => argument,
           () => readUnit(unitText),
         );

@@ -13,20 +13,20 @@ const ITEMS: Readonly<Record<string, (solved: SolvedExtent) => CellScalar>> = {
   status: ({ outcome }) => outcome.status,
   reason: ({ outcome }) => outcome.reason,
   extent: ({ outcome }) => (hasAnswer(outcome) ? outcome.extent : null),
-  unit: ({ setup }) => setup.fed.unitText,
+  unit: ({ setup }) => setup.matched.unitText,
   'lowest extent': ({ outcome }) => (hasAnswer(outcome) ? outcome.limits[0] : null),
   'highest extent': ({ outcome }) => (hasAnswer(outcome) ? outcome.limits[1] : null),
   'residual in ln units': ({ outcome }) => outcome.residual,
   'error bound in ln units': ({ outcome }) => outcome.errorBound,
   'limiting species': ({ setup, outcome: { limiting } }) =>
     limiting === null ? null : setup.setting.species[limiting]!,
-  'inert species': ({ setup: { fed } }) =>
-    listed(fed.inert.map(({ position }) => fed.form.lines[position]!.species)),
+  'inert species': ({ setup: { matched } }) =>
+    listed(matched.inert.map(({ position }) => matched.form.lines[position]!.species)),
   medium: ({ setup }) => setup.setting.medium,
-  'inert species mixed in it': ({ setup: { fed, setting } }) =>
+  'inert species mixed in it': ({ setup: { matched, setting } }) =>
     listed(
       setting.isFraction
-        ? mixedInert(fed, setting.medium).map(({ position }) => fed.form.lines[position]!.species)
+        ? mixedInert(matched, setting.medium).map(({ position }) => matched.form.lines[position]!.species)
         : [],
     ),
   'ln K used': ({ setup }) => setup.problem.lnK,

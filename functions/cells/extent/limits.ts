@@ -17,8 +17,8 @@ export const extentLimitsOf = defineFunction({
     },
   ],
   run({ equation, amounts }) {
-    const { feed, fed } = feedOf(equation, amounts);
+    const { feed, matched } = feedOf(equation, amounts);
     const [lowest, highest] = extentLimits(equation.stoichiometry, feed);
-    return { value: [[lowest, highest]], unit: fed.unitText };
+    return { value: [[lowest, highest]], unit: matched.unitText };
   },
 });

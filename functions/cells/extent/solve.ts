@@ -41,6 +41,6 @@ export const extentSolve = defineFunction({
   ],
   run(given) {
     const { outcome, setup } = solved(given);
-    return { value: outcome.extent, unit: setup.fed.unitText, outcome };
+    return { value: outcome.extent, unit: setup.matched.unitText, outcome };
   },
 });

@@ -72,16 +72,16 @@ function constantContribution({ conditions }: ExtentSetup): number[] {
 }
 
 /** d ln Q/d n_i = nu_i/n_i for a mixed species, less change/N where activities are fractions. */
-function amountContributions({ problem, fed, setting, table }: ExtentSetup): number[] {
+function amountContributions({ problem, matched, setting, table }: ExtentSetup): number[] {
   const { stoichiometry, feed, inert } = problem;
   const { mixed, change, isFraction } = setting;
   const total = feed.reduce((sum, n, i) => (mixed[i] ? sum + n : sum), inert);
   const byTotal = isFraction ? change / total : 0;
-  const reacting = fed.reacting.flatMap((position, i) => {
+  const reacting = matched.reacting.flatMap((position, i) => {
     const u = table.uncertainties[position] ?? null;
-    return u === null || !mixed[i] ? [] : (stoichiometry[i]! / feed[i]! - byTotal) * u * fed.factors[i]!;
+    return u === null || !mixed[i] ? [] : (stoichiometry[i]! / feed[i]! - byTotal) * u * matched.factors[i]!;
   });
-  const counted = isFraction && change !== 0 ? mixedInert(fed, setting.medium) : [];
+  const counted = isFraction && change !== 0 ? mixedInert(matched, setting.medium) : [];
   const others = counted.flatMap(({ position, factor }) => {
     const u = table.uncertainties[position] ?? null;
     return u === null ? [] : byTotal * u * factor();
@@ -93,7 +93,7 @@ function amountContributions({ problem, fed, setting, table }: ExtentSetup): num
  * d ln(K/Q)/d ln x is the change in mixed amount times an exponent: the constant's reference brings
  * it in, the scale of the activities takes it out.
  */
-function conditionContributions({ setting, fed, conditions }: ExtentSetup): number[] {
+function conditionContributions({ setting, matched, conditions }: ExtentSetup): number[] {
   const { medium, change, isFraction } = setting;
   if (change === 0 || medium === 'as given' || medium === 'ideal liquid') return [];
   const terms = conditions.rows.get('K in terms of')?.value;
@@ -101,8 +101,8 @@ function conditionContributions({ setting, fed, conditions }: ExtentSetup): numb
   const exponents = {
     pressure: one(terms === 'mole fraction') - one(isFraction),
     temperature:
-      one(isGas && terms === 'concentration') - one(isGas && !isFraction && fed.basis !== 'pressure'),
-    volume: one(!isFraction && fed.basis === 'amount'),
+      one(isGas && terms === 'concentration') - one(isGas && !isFraction && matched.basis !== 'pressure'),
+    volume: one(!isFraction && matched.basis === 'amount'),
   };
   return [
     ...relative(exponents.pressure, conditions, ['pressure', 'barometer'], 'bar', pressureBar),

@@ -11,7 +11,7 @@ import { type Conditions, NO_CONDITIONS } from '../reading/conditions.ts';
 import { linePlace } from '../reading/tableForm.ts';
 import { unitText } from './basis.ts';
 import { lnReference } from './constant.ts';
-import type { Fed } from './fed.ts';
+import type { MatchedLines } from './matchedLines.ts';
 import { feedOf } from './feed.ts';
 import { type Setting, settingOf } from './medium.ts';
 import { mixedInert } from './mixedInert.ts';
@@ -22,7 +22,7 @@ export interface ExtentSetup {
   readonly table: AmountsTable;
   readonly conditions: Conditions;
   readonly setting: Setting;
-  readonly fed: Fed;
+  readonly matched: MatchedLines;
   readonly problem: ExtentProblem;
   /** ln K on the activity basis less ln K as stated; ln Q in the stated terms is ln Q less this. */
   readonly lnBasisShift: number;
@@ -39,35 +39,35 @@ export function extentSetup(
   table: AmountsTable,
   conditions: Conditions = NO_CONDITIONS,
 ): ExtentSetup {
-  const setting = settingOf(reaction, conditions);
-  const { fed, feed } = feedOf(reaction, table, conditions.rows.has('removal'));
-  checkInert(reaction, conditions, fed);
-  checkAsGiven(setting, fed);
-  checkFractions(setting, fed, reaction);
-  checkDissolved(setting, fed, reaction, conditions);
+  const setting = settingOf(conditions, reaction);
+  const { matched, feed } = feedOf(reaction, table, conditions.rows.has('removal'));
+  checkInert(reaction, conditions, matched);
+  checkAsGiven(setting, matched);
+  checkFractions(setting, matched, reaction);
+  checkDissolved(setting, matched, reaction, conditions);
   const { change, mixed, isFraction } = setting;
-  const lnBasisShift = change === 0 ? 0 : change * lnReference(setting, conditions, fed.reference);
+  const lnBasisShift = change === 0 ? 0 : change * lnReference(setting, conditions, matched.reference);
   const problem: ExtentProblem = {
     species: setting.species,
-    unit: fed.unitText,
+    unit: matched.unitText,
     stoichiometry: reaction.stoichiometry,
     feed,
     mixed,
     activity: isFraction ? 'fraction' : 'amount',
-    lnScale: change === 0 ? 0 : lnScale(setting, fed, conditions),
-    inert: isFraction ? inertAmount(setting, fed, table) : 0,
+    lnScale: change === 0 ? 0 : lnScale(setting, matched, conditions),
+    inert: isFraction ? inertAmount(setting, matched, table) : 0,
     lnK: lnK + lnBasisShift,
   };
-  return { reaction, table, conditions, setting, fed, problem, lnBasisShift };
+  return { reaction, table, conditions, setting, matched, problem, lnBasisShift };
 }
 
 /** ln of the activity of a unit amount (or of the unit fraction) of a mixed species. */
-function lnScale({ medium, isFraction }: Setting, fed: Fed, conditions: Conditions): number {
-  const { basis, factor } = fed;
+function lnScale({ medium, isFraction }: Setting, matched: MatchedLines, conditions: Conditions): number {
+  const { basis, factor } = matched;
   if (medium === 'as given' || medium === 'ideal liquid') return 0;
   if (medium === 'gas' && isFraction) {
     if (basis === 'pressure' || basis === 'concentration')
-      throw wrongBasis(fed, 'a gas at a pressure', 'mol or mol %');
+      throw wrongBasis(matched, 'a gas at a pressure', 'mol or mol %');
     return Math.log(pressureBar(conditions, 'a gas'));
   }
   if (medium === 'gas') {
@@ -75,21 +75,21 @@ function lnScale({ medium, isFraction }: Setting, fed: Fed, conditions: Conditio
     const RT = GAS_CONSTANT_L_BAR * temperatureK(conditions, 'a gas in a volume');
     if (basis === 'concentration') return Math.log(factor * RT);
     if (basis === 'amount') return Math.log((factor * RT) / volumeL(conditions, 'a gas in a volume'));
-    throw wrongBasis(fed, 'a gas in a volume', 'mol, mol/L or bar');
+    throw wrongBasis(matched, 'a gas in a volume', 'mol, mol/L or bar');
   }
   if (basis === 'concentration') return Math.log(factor);
   if (basis === 'amount') return Math.log(factor / volumeL(conditions, 'a solution with amounts in mol'));
-  throw wrongBasis(fed, 'a solution', 'mol/L, or mol with a volume row');
+  throw wrongBasis(matched, 'a solution', 'mol/L, or mol with a volume row');
 }
 
-function inertAmount({ medium }: Setting, fed: Fed, { amounts }: AmountsTable): number {
+function inertAmount({ medium }: Setting, matched: MatchedLines, { amounts }: AmountsTable): number {
   let sum = 0;
-  for (const { position, factor } of mixedInert(fed, medium)) sum += amounts[position]! * factor();
+  for (const { position, factor } of mixedInert(matched, medium)) sum += amounts[position]! * factor();
   return sum;
 }
 
 /** K for amounts as given speaks of one unit; with several, only a reaction in which it cancels is clear. */
-function checkAsGiven({ medium, mixed, change }: Setting, { form, factors, reacting }: Fed): void {
+function checkAsGiven({ medium, mixed, change }: Setting, { form, factors, reacting }: MatchedLines): void {
   if (medium !== 'as given' || change === 0) return;
   const other = factors.findIndex((factor, i) => mixed[i] && factor !== 1);
   if (other === -1) return;
@@ -98,7 +98,11 @@ function checkAsGiven({ medium, mixed, change }: Setting, { form, factors, react
 }
 
 /** A bare `%` or `ppm` is common for the moles of a gas; of a liquid or a solute it may mean mass. */
-function checkFractions({ medium }: Setting, { form, reacting }: Fed, { species }: CheckedReaction): void {
+function checkFractions(
+  { medium }: Setting,
+  { form, reacting }: MatchedLines,
+  { species }: CheckedReaction,
+): void {
   if (medium === 'gas') return;
   reacting.forEach((position, i) => {
     const line = form.lines[position]!;
@@ -110,7 +114,7 @@ function checkFractions({ medium }: Setting, { form, reacting }: Fed, { species 
 /** Constants of dissolved species are stated in mol/L; with amounts as given in mmol/L one of the two is meant. */
 function checkDissolved(
   { medium, mixed, change }: Setting,
-  { form, reacting, reference }: Fed,
+  { form, reacting, reference }: MatchedLines,
   { species }: CheckedReaction,
   { rows }: Conditions,
 ): void {
@@ -125,7 +129,7 @@ function checkDissolved(
 const DISSOLVED_UNITS = ['mol/L', 'mol/kg'];
 
 /** A species named as inert must be fed and must not stand in the equation. */
-function checkInert(reaction: CheckedReaction, conditions: Conditions, { form, inert }: Fed): void {
+function checkInert(reaction: CheckedReaction, conditions: Conditions, { form, inert }: MatchedLines): void {
   for (const name of conditions.inert) {
     if (inert.some(({ position }) => form.lines[position]!.species === name)) continue;
     if (matchSpecies({ species: inert.map(({ species }) => species()) }, name) !== null) continue;
@@ -133,6 +137,6 @@ function checkInert(reaction: CheckedReaction, conditions: Conditions, { form, i
   }
 }
 
-function wrongBasis({ unitText: unit }: Fed, medium: string, wanted: string) {
+function wrongBasis({ unitText: unit }: MatchedLines, medium: string, wanted: string) {
   return inputError('amounts-basis', { unit: unit ?? 'no unit', medium, wanted });
 }

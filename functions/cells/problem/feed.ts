@@ -5,10 +5,10 @@ import type { Reaction } from '../../chemistry/equation.ts';
 import { inputError } from '../../errors.ts';
 import type { AmountsTable } from '../reading/amounts.ts';
 import { linePlace } from '../reading/tableForm.ts';
-import { type Fed, fedBy } from './fed.ts';
+import { matchedLines, type MatchedLines } from './matchedLines.ts';
 
 export interface Feed {
-  readonly fed: Fed;
+  readonly matched: MatchedLines;
   /** One amount for each species of the equation. */
   readonly feed: readonly number[];
 }
@@ -16,16 +16,16 @@ export interface Feed {
 /**
  * The feed that a table states for a reaction.
  *
- * Errors: those of `fedBy`, and `amounts-negative` unless removal is allowed.
+ * Errors: those of `matchedLines`, and `amounts-negative` unless removal is allowed.
  */
 export function feedOf(reaction: Reaction, table: AmountsTable, isRemovalAllowed = false): Feed {
-  const fed = fedBy(reaction, table.form);
+  const matched = matchedLines(table.form, reaction);
   const { amounts } = table;
   for (let i = 0; i < amounts.length; i++) {
-    if (amounts[i]! >= 0 || (isRemovalAllowed && fed.speciesOf[i] !== -1)) continue;
+    if (amounts[i]! >= 0 || (isRemovalAllowed && matched.speciesOf[i] !== -1)) continue;
     throw negativeAmount(table, i);
   }
-  return { fed, feed: fed.reacting.map((position, i) => amounts[position]! * fed.factors[i]!) };
+  return { matched, feed: matched.reacting.map((position, i) => amounts[position]! * matched.factors[i]!) };
 }
 
 /** The error of a line whose amount is negative. */

@@ -1,13 +1,13 @@
 import { convertValue } from '../../chemistry/units/convert.ts';
 import { readUnit } from '../../chemistry/units/readUnit.ts';
-import { at, inputError } from '../../errors.ts';
+import { inputError, withPlace } from '../../errors.ts';
 
 /** A bare temperature in kelvin; `unit` is K where left out. Errors: `temperature-range`, those of the unit. */
 export function kelvin(value: number, unit: string | undefined, argument: string): number {
   const temperatureK =
     unit === undefined
       ? value
-      : at(
+      : withPlace(
           () => 'unit',
           () => convertValue(value, readUnit(unit), readUnit('K')),
         );

@@ -9,6 +9,7 @@ import type { Reaction } from '../../chemistry/equation.ts';
 import type { Species } from '../../chemistry/species.ts';
 import { inputError } from '../../errors.ts';
 import type { Conditions } from '../reading/conditions.ts';
+import { rememberPair } from './rememberPair.ts';
 
 export type Medium = 'as given' | 'gas' | 'solution' | 'ideal liquid';
 
@@ -35,23 +36,12 @@ const PHASES: Readonly<Record<Medium, { mixed: readonly string[]; pure: readonly
 /**
  * The medium of a reaction under these conditions.
  *
- * Errors: `medium-two-rows` (pressure and volume), `medium-as-given` and `medium-phase` (rows or tags that exclude the
- * medium), `medium-tags-forgotten` (a
- * pressure or a volume that nothing uses), `medium-missing` (a gas reaction without pressure or
- * volume), `medium-liquids` (several liquids, mixed or not), `medium-untagged`.
+ * Errors: `medium-two-rows` (a gas with pressure and volume), `medium-as-given` and `medium-phase` (rows
+ * or tags that exclude the medium), `medium-tags-forgotten` (a pressure or a volume that nothing uses),
+ * `medium-missing` (a gas reaction without either), `medium-liquids` (several liquids, mixed or not),
+ * `medium-untagged`.
  */
-export function settingOf(reaction: Reaction, conditions: Conditions): Setting {
-  let byReaction = known.get(conditions);
-  if (byReaction === undefined) known.set(conditions, (byReaction = new WeakMap<Reaction, Setting>()));
-  let setting = byReaction.get(reaction);
-  if (setting === undefined) byReaction.set(reaction, (setting = chosenSetting(reaction, conditions)));
-  return setting;
-}
-
-/** It follows from words alone; many cells share their conditions, or have none. */
-const known = new WeakMap<Conditions, WeakMap<Reaction, Setting>>();
-
-function chosenSetting(reaction: Reaction, conditions: Conditions): Setting {
+export const settingOf = rememberPair((conditions: Conditions, reaction: Reaction): Setting => {
   const stated = conditions.rows.get('medium')?.value as Medium | undefined;
   const hasPressure = conditions.rows.has('pressure');
   const hasVolume = conditions.rows.has('volume');
@@ -68,7 +58,7 @@ function chosenSetting(reaction: Reaction, conditions: Conditions): Setting {
   const setting = settingIn(medium, stated, reaction, hasVolume);
   checkGas(reaction, medium, stated, hasPressure || hasVolume);
   return setting;
-}
+});
 
 function settingIn(
   medium: Medium,

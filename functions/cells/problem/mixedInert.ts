@@ -1,6 +1,6 @@
 import { inputError } from '../../errors.ts';
 import { linePlace } from '../reading/tableForm.ts';
-import type { Fed, InertLine } from './fed.ts';
+import type { MatchedLines, InertLine } from './matchedLines.ts';
 import { countsInMedium, type Medium } from './medium.ts';
 
 /**
@@ -8,7 +8,7 @@ import { countsInMedium, type Medium } from './medium.ts';
  *
  * Errors: `amounts-twice` for a species that two of them name, and those of the species.
  */
-export function mixedInert({ form, inert }: Fed, medium: Medium): InertLine[] {
+export function mixedInert({ form, inert }: MatchedLines, medium: Medium): InertLine[] {
   const first = new Map<string, InertLine>();
   for (const line of inert) {
     const species = line.species();

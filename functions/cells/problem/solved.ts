@@ -40,10 +40,10 @@ export function solved(given: ExtentArguments): SolvedExtent {
 
 /** The amount of a line of the table, in its own unit, from one amount for each species of the equation. */
 export function amountInLine(
-  { fed, table }: Pick<ExtentSetup, 'fed' | 'table'>,
+  { matched, table }: Pick<ExtentSetup, 'matched' | 'table'>,
   found: readonly number[],
   position: number,
 ): number {
-  const index = fed.speciesOf[position]!;
-  return index === -1 ? table.amounts[position]! : found[index]! / fed.factors[index]!;
+  const index = matched.speciesOf[position]!;
+  return index === -1 ? table.amounts[position]! : found[index]! / matched.factors[index]!;
 }

@@ -14,7 +14,7 @@ const ALWAYS_USED: readonly ConditionName[] = [
   'gas model',
 ];
 
-export function unusedConditions({ conditions: { rows }, setting, fed }: ExtentSetup): string[] {
+export function unusedConditions({ conditions: { rows }, setting, matched }: ExtentSetup): string[] {
   const used = new Set<ConditionName>(ALWAYS_USED);
   const { medium, change, isFraction } = setting;
   const terms = rows.get('K in terms of')?.value;
@@ -22,9 +22,9 @@ export function unusedConditions({ conditions: { rows }, setting, fed }: ExtentS
   // These two choose how a gas is taken, also where their value cancels.
   if (medium === 'gas') used.add('pressure').add('volume');
   if (change !== 0 && medium === 'gas') {
-    if (terms === 'concentration' || (!isFraction && fed.basis !== 'pressure')) used.add('temperature');
+    if (terms === 'concentration' || (!isFraction && matched.basis !== 'pressure')) used.add('temperature');
   }
-  if (change !== 0 && medium === 'solution' && fed.basis === 'amount') used.add('volume');
+  if (change !== 0 && medium === 'solution' && matched.basis === 'amount') used.add('volume');
   if (used.has('pressure') && rows.get('pressure')?.unit?.quantity === 'gauge pressure')
     used.add('barometer');
   return [...rows.keys()].filter((name) => !used.has(name));

@@ -7,7 +7,7 @@
 import { convertDifference, convertValue, toBase } from '../../chemistry/units/convert.ts';
 import { readUnit } from '../../chemistry/units/readUnit.ts';
 import type { Unit } from '../../chemistry/units/unit.ts';
-import { at, inputError } from '../../errors.ts';
+import { inputError, withPlace } from '../../errors.ts';
 import type { CellScalar, CellTable, Parameter } from '../entry.ts';
 import { describe } from '../parameters/describe.ts';
 import {
@@ -144,7 +144,7 @@ function readConditionUnit(rule: ConditionRule, cell: CellScalar, place: string)
     throw inputError('condition-unit', { place, given: 'no unit', wanted });
   }
   if (typeof cell !== 'string') throw inputError('condition-unit', { place, given: describe(cell), wanted });
-  const unit = at(
+  const unit = withPlace(
     () => place,
     () => readUnit(cell),
   );

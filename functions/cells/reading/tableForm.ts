@@ -6,7 +6,7 @@
  */
 import { readUnit } from '../../chemistry/units/readUnit.ts';
 import type { Unit } from '../../chemistry/units/unit.ts';
-import { at, inputError } from '../../errors.ts';
+import { inputError, withPlace } from '../../errors.ts';
 import type { CellScalar } from '../entry.ts';
 import { describe } from '../parameters/describe.ts';
 import { coverageFactorUnder } from './heading.ts';
@@ -132,7 +132,7 @@ function readLabel(cell: CellScalar, place: string): string {
 function readLineUnit(cell: CellScalar, place: string): Unit | null {
   if (cell === null || cell === '') return null;
   if (typeof cell === 'string') {
-    return at(
+    return withPlace(
       () => place,
       () => readUnit(cell),
     );

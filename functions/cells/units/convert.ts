@@ -1,7 +1,7 @@
 import { convertValue, toBase } from '../../chemistry/units/convert.ts';
 import { readUnit } from '../../chemistry/units/readUnit.ts';
 import type { Unit } from '../../chemistry/units/unit.ts';
-import { at, inputError } from '../../errors.ts';
+import { inputError, withPlace } from '../../errors.ts';
 import { defineFunction } from '../entry.ts';
 import { describe } from '../parameters/describe.ts';
 import { number } from '../parameters/number.ts';
@@ -49,7 +49,7 @@ export const unitsConvert = defineFunction({
 });
 
 function unitOf(written: string, argument: string): Unit {
-  return at(
+  return withPlace(
     () => argument,
     () => readUnit(written),
   );

@@ -7,11 +7,12 @@ import { matchSpecies } from '../../chemistry/match.ts';
 import { parseSpecies, type Species } from '../../chemistry/species.ts';
 import { molPerUnit } from '../../chemistry/units/molPerUnit.ts';
 import type { Quantity, Unit } from '../../chemistry/units/unit.ts';
-import { at, inputError } from '../../errors.ts';
+import { inputError, withPlace } from '../../errors.ts';
 import { type FormLine, linePlace, type TableForm } from '../reading/tableForm.ts';
 import { type Basis, commonBasis } from './basis.ts';
+import { rememberPair } from './rememberPair.ts';
 
-export interface Fed {
+export interface MatchedLines {
   readonly form: TableForm;
   /** For each species of the equation, the position of its line in the form. */
   readonly reacting: readonly number[];
@@ -61,8 +62,6 @@ const BASE_UNIT: Readonly<Record<Basis, string | null>> = {
   'no unit': null,
 };
 
-const known = new WeakMap<TableForm, WeakMap<Reaction, Fed>>();
-
 /**
  * The lines of a table as the species of a reaction.
  *
@@ -70,15 +69,7 @@ const known = new WeakMap<TableForm, WeakMap<Reaction, Fed>>();
  * `amounts-count` (a bare row or column of another length), `species-two-readings`, and those of
  * the units.
  */
-export function fedBy(reaction: Reaction, form: TableForm): Fed {
-  let byReaction = known.get(form);
-  if (byReaction === undefined) known.set(form, (byReaction = new WeakMap<Reaction, Fed>()));
-  let fed = byReaction.get(reaction);
-  if (fed === undefined) byReaction.set(reaction, (fed = matchLines(reaction, form)));
-  return fed;
-}
-
-function matchLines(reaction: Reaction, form: TableForm): Fed {
+export const matchedLines = rememberPair((form: TableForm, reaction: Reaction): MatchedLines => {
   const speciesOf = form.isLabelled ? labelledSpecies(reaction, form) : bareSpecies(reaction, form);
   const reacting = reaction.species.map((_, index) => speciesOf.indexOf(index));
   const lines = reacting.map((position) => form.lines[position]!);
@@ -88,7 +79,7 @@ function matchLines(reaction: Reaction, form: TableForm): Fed {
   const factor = reference?.factor ?? 1;
   const factorOf = (line: FormLine, species: Species): number => {
     if (line.unit === null || line.unit.text === reference?.text) return 1;
-    return at(
+    return withPlace(
       () => linePlace(form, line),
       () => molPerUnit(line.unit!, species) / factor,
     );
@@ -96,7 +87,7 @@ function matchLines(reaction: Reaction, form: TableForm): Fed {
   const inert = form.lines.flatMap((line, position) => {
     if (speciesOf[position] !== -1) return [];
     const species = () =>
-      at(
+      withPlace(
         () => linePlace(form, line),
         () => parseSpecies(line.species),
       );
@@ -117,7 +108,7 @@ function matchLines(reaction: Reaction, form: TableForm): Fed {
     factor,
     factors: lines.map((line, i) => factorOf(line, reaction.species[i]!)),
   };
-}
+});
 
 function bareSpecies({ species }: Reaction, { lines }: TableForm): number[] {
   if (lines.length === species.length) return species.map((_, index) => index);
@@ -132,7 +123,7 @@ function labelledSpecies(reaction: Reaction, form: TableForm): number[] {
   const speciesOf: number[] = [];
   for (const line of form.lines) {
     const place = () => linePlace(form, line);
-    const index = at(place, () => matchSpecies(reaction, line.species)) ?? -1;
+    const index = withPlace(place, () => matchSpecies(reaction, line.species)) ?? -1;
     const first = index === -1 ? -1 : speciesOf.indexOf(index);
     if (first !== -1) {
       throw inputError('amounts-twice', { place: place(), first: linePlace(form, form.lines[first]!) });
