@@ -56,6 +56,8 @@ export interface InputValue {
   /** Canonical address, `Kettle!B4`. */
   readonly cell: string;
   readonly value: Value;
+  /** What the workbook itself has there; another one than `value` where it was worked with other values. */
+  readonly own: Value;
   readonly unit: string | null;
   readonly min: number | null;
   readonly max: number | null;

@@ -1,3 +1,4 @@
+import { equilibria } from './equilibria.ts';
 import type { Evaluated } from './evaluation.ts';
 
 const INDENT = 2;
@@ -12,6 +13,7 @@ export function resultJson({ given, evaluation, ownFunctions }: Evaluated, withC
     outputs: mapped(outputs, ({ cell, value, unit }) => ({ cell, value, unit })),
     ...(withCells && { sheets }),
     problems,
+    equilibria: equilibria(evaluation),
     checks: checks.map(({ passed, expected, found, source }) => ({ passed, expected, found, source })),
     versions,
     instant,

@@ -107,7 +107,7 @@ export class Host {
       sheets,
       formulas: this.#formulas(),
       problems: this.#problems(sheets),
-      // Checks change the inputs: nothing may be read after them.
+      // Checks change the inputs: no cell may be read after them.
       checks: this.#checks(),
       instant: this.#session.instantRead,
     };
@@ -117,7 +117,7 @@ export class Host {
     return Object.fromEntries(
       this.#workbook.inputs.map(({ name, ...input }) => [
         name,
-        { ...input, value: this.#cells.value(this.#cells.place(input.cell)) },
+        { ...input, value: this.#cells.value(this.#cells.place(input.cell)), own: this.#own[name] ?? null },
       ]),
     );
   }

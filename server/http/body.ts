@@ -9,11 +9,19 @@ export const MAX_BODY_BYTES = 65_536;
 
 export const BODY_EXAMPLE = '{"workbook": "kettle", "inputs": {"acid": 1.5}}';
 
-const evaluationRequest = z.strictObject({
-  workbook: z.string(),
-  // Not a z.record: that drops the name __proto__, and no name may be passed over in silence.
-  inputs: z.custom<Given>(areInputs, 'its values are numbers, texts, true or false').default({}),
-});
+const evaluationRequest = z.strictObject(
+  {
+    workbook: z.string({ error: 'it is the name of a workbook, a text' }),
+    // Not a z.record: that drops the name __proto__, and no name may be passed over in silence.
+    inputs: z.custom<Given>(areInputs, 'its values are numbers, texts, true or false').default({}),
+  },
+  {
+    error: (issue) =>
+      issue.code === 'unrecognized_keys'
+        ? `it has ${issue.keys.join(', ')}, and takes only workbook and inputs`
+        : 'it is an object with the name of a workbook',
+  },
+);
 
 type EvaluationRequest = z.infer<typeof evaluationRequest>;
 

@@ -7,8 +7,8 @@ export const ENGINE_ERRORS = {
     remedy: 'Check the cell that it divides by; a blank cell counts as 0.',
   },
   'unknown-function': {
-    says: '{detail}',
-    remedy: 'Check its spelling; `evenkeel functions` lists ours.',
+    says: 'there is no function {name}',
+    remedy: '{nearest} `evenkeel functions` lists ours.',
   },
   'wrong-kind': {
     says: 'a value is of the wrong kind for the formula ({detail})',
@@ -40,6 +40,6 @@ export const ENGINE_ERRORS = {
   },
   'random-value': {
     says: '{name} gives another value each time, so that nothing that reads it could be retraced',
-    remedy: 'Type the value into a cell, or make it an input and give the cases to a batch.',
+    remedy: 'Type the value into a cell, or make it an input and give it another value for each case.',
   },
 } as const satisfies Record<string, ErrorTemplate>;

@@ -4,11 +4,11 @@ import type { ErrorTemplate } from '../../functions/errorTable.ts';
 export const SIZE_ERRORS = {
   'workbook-too-large': {
     says: 'the workbook has {size} bytes, and the limit is {limit}',
-    remedy: 'Split it, or give its cases to a batch instead of rows.',
+    remedy: 'Split it into several workbooks.',
   },
   'sheet-too-large': {
     says: 'sheet {sheet} reaches to {cell}, which makes {cells} cells; the limit is {limit} in a workbook',
-    remedy: 'Move the blocks towards A1, or give the cases to a batch instead of rows.',
+    remedy: 'Move the blocks towards A1, or split the workbook.',
   },
 } as const satisfies Record<string, ErrorTemplate>;
 

@@ -144,6 +144,14 @@ export const WORKBOOK_ERRORS = {
     says: 'check {check} expects a number for {name} but does not say how near',
     remedy: 'Give `within: 0.001` or `within: 0.1 %`, or one for each output by its name.',
   },
+  'check-empty': {
+    says: 'check {check} expects nothing',
+    remedy: 'Name an output under `expect`, with what it should show.',
+  },
+  'check-zero': {
+    says: 'check {check} expects 0 for {name} within a share of it, and a share of 0 allows nothing',
+    remedy: 'Give an absolute tolerance, such as `within: 0.001`.',
+  },
   'check-block': {
     says: 'check {check} expects {found} of {name}, whose cells take {expected}',
     remedy: 'Give a value for a cell, and a list of rows of the same size for a range.',

@@ -23,8 +23,7 @@ function answerLine(page: Page, name: string, output: OutputValue): Line {
   return {
     reference: html`${page.linkTo(area)}${steps.length === 0 ? null : html`<br />${stepLinks(steps)}`}`,
     calculation: html`<p class="name">${name}</p>
-      ${label === '' ? null : html`<p>${label}</p>`}
-      <p>${standing(page, area)}</p>`,
+      ${label === '' ? null : html`<p>${label}</p>`} ${standing(page, area)}`,
     output: outputMarkup(page, area, output),
   };
 }
@@ -32,13 +31,13 @@ function answerLine(page: Page, name: string, output: OutputValue): Line {
 /** What the answer rests on. */
 function standing(page: Page, area: Reference): Part {
   const behind = page.calculation.formulasBehind(area);
-  if (behind.length === 0) return 'a typed value';
+  if (behind.length === 0) return html`<p>a typed value</p>`;
   const outcomes = behind.flatMap(({ formula }) => formula.answers.flatMap(({ outcome }) => outcome ?? []));
-  if (outcomes.length === 0) return html`<span class="quiet">no equilibrium is solved for it</span>`;
+  if (outcomes.length === 0) return null;
   const reasons = new Set(outcomes.map(({ reason }) => reason).filter((reason) => reason !== ''));
   const why = reasons.size === 0 ? null : html` (${joined([...reasons].slice(0, 3), '; ')})`;
-  return html`${outcomes.length === 1 ? 'equilibrium' : `${outcomes.length} equilibria`} behind it:
-  ${statusCounts(outcomes)}${why}`;
+  const count = outcomes.length === 1 ? 'equilibrium' : `${outcomes.length} equilibria`;
+  return html`<p>${count} behind it: ${statusCounts(outcomes)}${why}</p>`;
 }
 
 function outputMarkup(page: Page, area: Reference, output: OutputValue): Markup {

@@ -6,7 +6,7 @@ import { row, section } from './section.ts';
 const LIMITS_OF_USE = [
   'The results hold for the equations, data and conditions that the workbook states, and for equilibrium: they say nothing of how fast it is reached.',
   'Where pressure, heat, toxic or flammable gas, or dosing is involved, they are one input to the judgement of a qualified person and not a design. Local codes, the law and licensed practice come first.',
-  'The sheet is not checked until somebody other than its author has signed it above.',
+  'A sheet is not checked until somebody other than its author has signed its title block.',
 ];
 
 export function limitsOfUse(): Markup {

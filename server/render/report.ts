@@ -9,7 +9,7 @@ import { attention, matters, verdict } from './attention.ts';
 import { checks } from './checks.ts';
 import { limitsOfUse, versions } from './closing.ts';
 import { stylesheet } from './style/stylesheet.ts';
-import { given } from './given.ts';
+import { given, otherValues } from './given.ts';
 import { html, type Markup } from './html.ts';
 import { pageOf, type Page } from './page.ts';
 import { sourceSheets } from './source/sourceSheets.ts';
@@ -44,9 +44,9 @@ export function renderReport(evaluation: Evaluation, served: ServedParts = {}): 
       <body>
         ${served.top ?? null} ${titleBlock(page)}
         <main>
-          ${verdict(page, lines.length)} ${answers(page)} ${(served.given ?? given)(page)}
-          ${stepSection(page)} ${checks(page)} ${attention(lines)} ${limitsOfUse()} ${versions(page)}
-          ${sourceSheets(page)}
+          ${otherValues(page)} ${verdict(page, lines.length)} ${answers(page)}
+          ${(served.given ?? given)(page)} ${stepSection(page)} ${checks(page)} ${attention(lines)}
+          ${limitsOfUse()} ${versions(page)} ${sourceSheets(page)}
         </main>
       </body>
     </html> `.markup;

@@ -36,16 +36,17 @@ export function padSection(id: string, heading: string, lines: readonly Line[]):
       )}
     </tbody>
   </table>`;
-  return section(id, heading, lines.length === 0 ? null : table);
+  const hasOutputs = lines.some(({ output }) => output !== null);
+  return section(id, heading, lines.length === 0 ? null : table, hasOutputs);
 }
 
-/** A section with its heading in the column for calculation. */
-export function section(id: string, heading: string, content: Part): Markup {
+/** A section with its heading in the column for calculation; the others are named where there are outputs. */
+export function section(id: string, heading: string, content: Part, hasOutputs = false): Markup {
   return html`<section id="${id}" aria-labelledby="${id}-heading">
     <div class="row heading">
-      <p aria-hidden="true">Reference</p>
+      <p aria-hidden="true">${hasOutputs ? 'Reference' : null}</p>
       <h2 id="${id}-heading">${heading}</h2>
-      <p aria-hidden="true">Output</p>
+      <p aria-hidden="true">${hasOutputs ? 'Output' : null}</p>
     </div>
     ${content}
   </section>`;

@@ -23,14 +23,14 @@ export function isSettled(status: Status): boolean {
   return status === 'settled' || status === 'at limit';
 }
 
-/** `settled`, or `settled 198, exhausted 2`: how many of each, the most frequent first. */
+/** `settled`, or `198 settled, 2 exhausted`: how many of each, the most frequent first. */
 export function statusCounts(outcomes: readonly Outcome[]): Markup {
   const counts = new Map<Status, number>();
   for (const { status } of outcomes) counts.set(status, (counts.get(status) ?? 0) + 1);
   const sorted = [...counts].sort((a, b) => b[1] - a[1]);
   return html`${sorted.map(([status, count], index) => [
     index === 0 ? null : ', ',
+    sorted.length === 1 ? null : `${count} `,
     html`<strong class="${isSettled(status) ? 'good' : 'bad'}">${status}</strong>`,
-    sorted.length === 1 ? null : ` ${count}`,
   ])}`;
 }

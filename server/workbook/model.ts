@@ -40,7 +40,7 @@ export interface FormulaCell {
   readonly formula: string;
 }
 
-/** A cell that a batch or `--set` may change. */
+/** A cell that a case, such as that of a check or of `--set`, may change. */
 export interface Input {
   readonly name: string;
   /** `Kettle!B4` */

@@ -73,8 +73,12 @@ function readExpectations(
     const within = hasNumber(expected) ? toleranceOf(name, written.within) : null;
     if (within === null && hasNumber(expected))
       report(serverError('check-tolerance', { check, name }), place);
+    if (within !== null && allowsNothing(expected, within)) {
+      report(serverError('check-zero', { check, name }), place);
+    }
     return { output: name, expected, within };
   });
+  if (expectations.length === 0) report(serverError('check-empty', { check }), [...path, 'expect']);
   refuseStrayTolerances(written, reading);
   return expectations;
 }
@@ -102,6 +106,12 @@ function hasNumber(expected: Expectation['expected']): boolean {
   return isRows(expected)
     ? expected.flat().some((value) => typeof value === 'number')
     : typeof expected === 'number';
+}
+
+/** Whether the tolerance is a share of zero throughout; among other numbers a zero is meant exactly. */
+function allowsNothing(expected: Expectation['expected'], within: Tolerance): boolean {
+  if ('absolute' in within) return false;
+  return [expected].flat(2).every((value) => typeof value !== 'number' || value === 0);
 }
 
 function toleranceOf(name: string, within: WrittenCheck['within']): Tolerance | null {

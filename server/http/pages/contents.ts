@@ -1,15 +1,15 @@
 import { limitsOfUse } from '../../render/closing.ts';
-import { html, joined, type Part } from '../../render/html.ts';
+import { html, type Part } from '../../render/html.ts';
 import { type Line, padSection } from '../../render/section.ts';
 import type { OwnFunctions } from '../../engine/ownFunctions.ts';
 import type { Workbook } from '../../workbook/model.ts';
 import type { Serving } from '../serving.ts';
 import { documentOf } from './document.ts';
 
-/** The list of sheets: where each is, what it is about, what it answers. */
+/** The list of sheets: where each is, what it is about, how many outputs it has. */
 export function contentsPage({ workbooks, ownFunctions }: Serving): string {
   return documentOf({
-    title: 'Calculation sheets',
+    title: 'Evenkeel: calculation sheets',
     about:
       'Each is worked when it is opened. Change what is given on the sheet itself; the file of the workbook stays as it is.',
     top: null,
@@ -26,13 +26,8 @@ function sheetLine([name, { title, about, outputs }]: [string, Workbook]): Line 
     reference: html`<span class="code">${name}</span>`,
     calculation: html`<h3><a href="/sheets/${encodeURIComponent(name)}">${title}</a></h3>
       <p>${about}</p>`,
-    output: html`<p class="quiet">answers</p>
-      <p>${joined(outputs.map(answerOf), ', ')}</p>`,
+    output: outputs.length === 1 ? '1 output' : `${outputs.length} outputs`,
   };
-}
-
-function answerOf({ name, unit }: Workbook['outputs'][number]): Part {
-  return unit === null ? name : html`${name} <span class="quiet">in ${unit}</span>`;
 }
 
 function ownSection({ file, sha256, functions }: OwnFunctions): Part {

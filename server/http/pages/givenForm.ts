@@ -1,6 +1,6 @@
 /** What is given, each value a field where it stands; works without a script. */
 import type { InputValue } from '../../evaluation.ts';
-import { limitsOf } from '../../render/given.ts';
+import { limitsOf, ownValue } from '../../render/given.ts';
 import { html, type Markup } from '../../render/html.ts';
 import type { Page } from '../../render/page.ts';
 import { padSection } from '../../render/section.ts';
@@ -18,8 +18,9 @@ export function givenForm(name: string): (page: Page) => Markup | null {
       return {
         reference: cell && page.linkTo(cell),
         calculation: html`<p>
-          <label for="${id}">${input}</label> <span id="${id}-limits">${limitsOf(value)}</span>
-        </p>`,
+            <label for="${id}">${input}</label> <span id="${id}-limits">${limitsOf(value)}</span>
+          </p>
+          ${ownValue(value)}`,
         output: html`${field(id, input, value)}${unitOf(value)}`,
       };
     });

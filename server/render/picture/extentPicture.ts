@@ -115,5 +115,5 @@ function description(outcome: ExtentOutcome, unit: string | null, meetsK: boolea
   const meeting = meetsK
     ? `It meets the level of K, ln K = ${lnK}, at ${where}.`
     : `It does not meet the level of K, ln K = ${lnK}: the reaction ends at ${where}.`;
-  return `ln Q rises with the extent. ${meeting} ${range}`;
+  return `ln Q against the extent. ${meeting} ${range}`;
 }

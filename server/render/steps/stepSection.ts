@@ -19,10 +19,9 @@ export function stepSection(page: Page): Markup | null {
   if (steps.length === 0) return null;
   const shownIn = new Map<string, string>();
   const articles = steps.map((step) => stepArticle(page, step, shownIn));
-  return section('steps', 'Steps', [
-    row({ reference: null, calculation: html`<p class="quiet">${INTRODUCTION}</p>`, output: null }),
-    articles,
-  ]);
+  const introduction = html`<p class="quiet">${INTRODUCTION}</p>`;
+  const content = [row({ reference: null, calculation: introduction, output: null }), articles];
+  return section('steps', 'Steps', content, true);
 }
 
 /** `shownIn` remembers in which step a solution was shown, with its equation: once is enough. */

@@ -82,7 +82,14 @@ describe('errors', () => {
   });
 
   it('are told for a function that is not known', () => {
-    expect(hostOf({ A1: '=NO.SUCH(1)' }).values('S!A1')).toMatchObject({ error: 'unknown-function' });
+    const values = (formula: string) => hostOf({ A1: formula }).values('S!A1');
+    expect(values('=NO.SUCH(1)')).toEqual({
+      error: 'unknown-function',
+      message: 'there is no function NO.SUCH. Check its spelling. `evenkeel functions` lists ours.',
+    });
+    expect(values('=EXTENT.SLOVE(1)')).toMatchObject({
+      message: expect.stringContaining('EXTENT.SLOVE. Did you mean EXTENT.SOLVE?') as string,
+    });
   });
 
   it('are told for a cycle, for a lost sheet and for an array answer without room', () => {

@@ -19,13 +19,15 @@ const hostile: Workbook = workbookWith(
 const app = appOf([kettle, hostile]);
 
 describe('the list of sheets', () => {
-  it('leads to each sheet, tells what it is about and answers, and shows the caution', async () => {
+  it('names the program, leads to each sheet, tells what it is about, and shows the caution', async () => {
     const { status, text, type } = await request(app).get('/');
     expect({ status, type }).toEqual({ status: 200, type: 'text/html' });
     expect(text).toContain('<a href="/sheets/kettle">Ester kettle, trial 7</a>');
     expect(text).toContain('<a href="/sheets/a%20b%26c">');
     expect(text).toContain('Invented example.');
-    expect(text).toMatch(/extent\s+<span class="quiet">in mol<\/span>/);
+    expect(text).toContain('<h1>Evenkeel: calculation sheets</h1>');
+    expect(text).toContain('<td>1 output</td>');
+    expect(text).toContain('has signed its title block');
     expect(text).toContain('Local codes, the law and licensed practice come first.');
   });
 
@@ -50,6 +52,8 @@ describe('a sheet', () => {
     const { text } = await request(app).get('/sheets/kettle').query({ acid: '1.0' });
     expect(text).toMatch(/<input\s+type="number"[^>]*\svalue="1"/);
     expect(text).toContain('>0.87267<');
+    expect(text).toContain('Worked with other values than the workbook’s own: acid.');
+    expect(text).toMatch(/the workbook has <data value="2" >2<\/data>/);
   });
 
   it.each([

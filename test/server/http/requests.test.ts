@@ -139,6 +139,20 @@ describe('a request is refused, as problem details, when', () => {
     expect(response.status).toBe(status);
   });
 
+  it.each([
+    [[], 'the body does not fit: it is an object with the name of a workbook'],
+    [{}, 'workbook does not fit: it is the name of a workbook, a text'],
+    [
+      { workbook: 'kettle', file: 'x' },
+      'the body does not fit: it has file, and takes only workbook and inputs',
+    ],
+    [{ workbook: 'kettle', inputs: [1] }, 'inputs does not fit: its values are numbers'],
+  ])('its body is %j, and says why in our own words', async (body, says) => {
+    const { detail } = (await evaluate(body)).body as { detail: string };
+    expect(detail).toContain(says);
+    expect(detail).not.toMatch(/invalid|unrecognized/i);
+  });
+
   it('the server itself is at fault, without saying how it is made', async () => {
     const broken = appOf([kettle], { evaluate: () => Promise.reject(new Error('a secret path')) });
     const { status, text } = await request(broken).get('/sheets/kettle');

@@ -87,9 +87,26 @@ test('what needs attention is told at the head and listed: errors, unsettled sol
 test('a check says expected, found, within, source, and passed or not in words', () => {
   const checks = words(part(renderReport(converter()), 'checks'));
   expect(checks).toMatch(
-    /With pressure 200 ?\..*ammonia 15 14\.2 0\.1 Source: a figure remembered from an older sheet not passed/,
+    /With pressure 200, the rest the workbook’s own\..*ammonia 15 14\.2 0\.1 Source: a figure remembered from an older sheet not passed/,
   );
   expect(words(part(renderReport(kettle()), 'checks'))).toMatch(/extent 0\.8727 0\.87267 0\.1 % .*passed/);
+  expect(words(part(renderReport(kettle()), 'checks'))).toContain('With the workbook’s own values.');
+});
+
+test('other values than the workbook has are told under the title block and beside the input', () => {
+  const own = kettle();
+  expect(words(renderReport(own))).not.toMatch(/other values|the workbook has/);
+  const { acid, alcohol } = own.inputs;
+  const page = renderReport({ ...own, inputs: { acid: { ...acid!, own: 1.8 }, alcohol: alcohol! } });
+  expect(words(page)).toContain('Worked with other values than the workbook’s own: acid.');
+  expect(words(part(page, 'given'))).toMatch(/acid at least 0.* the workbook has 1\.8 2 mol/);
+});
+
+test('the column for output is named only over sections that have outputs', () => {
+  const page = renderReport(kettle());
+  const head = (id: string) => /<div class="row heading">[^]*?<\/div>/.exec(part(page, id))![0];
+  for (const id of ['answers', 'given', 'steps', 'checks']) expect(head(id)).toContain('>Output<');
+  for (const id of ['limits-of-use', 'versions']) expect(head(id)).not.toContain('>Output<');
 });
 
 test('states are told by words, not by colour alone', () => {

@@ -126,12 +126,19 @@ const PROBLEMS: [text: string, place: string, code: string, words: string][] = [
     'name-twice',
     'the name Acid is taken by the input acid',
   ],
-  [CHECKS('{given: {acdi: 1}, expect: {}, source: x}'), '8:19', 'check-name', 'no input of the workbook'],
+  [
+    CHECKS('{given: {acdi: 1}, expect: {total: x}, source: x}'),
+    '8:19',
+    'check-name',
+    'no input of the workbook',
+  ],
   [CHECKS('{expect: {totl: x}, source: x}'), '8:20', 'check-name', 'Did you mean total?'],
-  [CHECKS('{expect: {}, within: {total: 1}, source: x}'), '8:32', 'check-name', 'no expected output'],
+  [CHECKS('{expect: {total: x}, within: {totl: 1}, source: x}'), '8:40', 'check-name', 'no expected output'],
   [CHECKS('{expect: {constructor: x}, source: x}'), '8:20', 'check-name', 'constructor'],
-  [CHECKS('{given: {acid: -1}, expect: {}, source: x}'), '8:25', 'check-given', 'sets acid to -1'],
+  [CHECKS('{given: {acid: -1}, expect: {total: x}, source: x}'), '8:25', 'check-given', 'sets acid to -1'],
   [CHECKS('{expect: {total: 1}, source: x}'), '8:27', 'check-tolerance', 'within: 0.001'],
+  [CHECKS('{expect: {}, source: x}'), '8:19', 'check-empty', 'check 1 expects nothing'],
+  [CHECKS('{expect: {total: 0}, within: 1 %, source: x}'), '8:27', 'check-zero', 'an absolute tolerance'],
   [CHECKS('{expect: {total: [[a], [b]]}, source: x}'), '8:27', 'check-block', '2 rows of 1'],
 ];
 
