@@ -6,6 +6,7 @@ import { solveExtent, type ExtentProblem } from '../../functions/equilibrium/ind
 import { seededRandom } from '../../test/random/xorshift.ts';
 import { atLeast, atMost, forComparison, type Row } from '../benchRow.ts';
 import { shortestSeconds } from '../timing.ts';
+import { plain, solversOwn } from './solver/affinity.ts';
 import { solveByBisection } from './solver/bisection.ts';
 import { solveByBrent } from './solver/brent.ts';
 import { recordedArguments } from './solver/recordedArguments.ts';
@@ -36,7 +37,7 @@ export async function rows(): Promise<Row[]> {
     ROUNDS,
   );
   const ours = Math.abs(solveExtent(TRACE).amounts[0]! / TRACE_OF_A - 1);
-  const theirs = Math.abs((TRACE.feed[0]! - solveByBisection(TRACE)) / TRACE_OF_A - 1);
+  const theirs = Math.abs((TRACE.feed[0]! - solveByBisection(TRACE, solversOwn)) / TRACE_OF_A - 1);
   return [
     atMost(8, 'a solve, abs ln K < 12, against its own logarithms and exponentials', solving / functions),
     ...[12, 100, 690].flatMap(againstTextbook),
@@ -46,22 +47,26 @@ export async function rows(): Promise<Row[]> {
 }
 
 /**
- * Bisection is the textbook's bracketing root finder, and has the goal. Brent's method, the best known
- * one, stands beside it: where abs ln K < 12 neither has far to go, and it takes the time of a solve.
+ * The textbook's root finder that brackets, bisection, on the solver's own function, in the extent and
+ * to its last bit. Beside it Brent's method, the best known of its kind, on the same function and on
+ * the textbook's plain formula, which is cheaper and less exact.
  */
 function againstTextbook(lnK: number): Row[] {
   const problems = fourSpeciesProblems(lnK);
-  const { solving, bisecting, brent } = shortestSeconds(
+  const { solving, bisecting, brent, plainBrent } = shortestSeconds(
     {
       solving: () => total(problems, solve),
-      bisecting: () => total(problems, solveByBisection),
-      brent: () => total(problems, solveByBrent),
+      bisecting: () => total(problems, (problem) => solveByBisection(problem, solversOwn)),
+      brent: () => total(problems, (problem) => solveByBrent(problem, solversOwn)),
+      plainBrent: () => total(problems, (problem) => solveByBrent(problem, plain)),
     },
     ROUNDS,
   );
+  const where = `abs ln K < ${lnK}, against a solve`;
   return [
-    atLeast(3, `bisection in extent, abs ln K < ${lnK}, against a solve`, bisecting / solving),
-    forComparison(`Brent's method in extent, abs ln K < ${lnK}, against a solve`, brent / solving),
+    atLeast(3, `bisection, ${where}`, bisecting / solving),
+    forComparison(`Brent's method, ${where}`, brent / solving),
+    forComparison(`Brent's method on the plain formula, ${where}`, plainBrent / solving),
   ];
 }
 

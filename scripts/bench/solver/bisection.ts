@@ -4,15 +4,16 @@
  * Source: Burden and Faires, Numerical Analysis, section 2.1 (from memory).
  */
 import { extentLimits, type ExtentProblem } from '../../../functions/equilibrium/index.ts';
-import { affinity } from './affinity.ts';
+import type { Affinity } from './affinity.ts';
 
 /** The extent, halved until doubles hold nothing between the ends. */
-export function solveByBisection(problem: ExtentProblem): number {
+export function solveByBisection(problem: ExtentProblem, affinity: Affinity): number {
+  const f = affinity(problem);
   let [low, high] = extentLimits(problem.stoichiometry, problem.feed);
   for (;;) {
     const middle = low + (high - low) / 2;
     if (middle <= low || middle >= high) return middle;
-    if (affinity(problem, middle) < 0) low = middle;
+    if (f(middle) < 0) low = middle;
     else high = middle;
   }
 }

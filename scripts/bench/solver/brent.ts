@@ -4,12 +4,12 @@
  * Source: Brent, Algorithms for Minimization without Derivatives (1973), chapter 4, procedure zero.
  */
 import { extentLimits, type ExtentProblem } from '../../../functions/equilibrium/index.ts';
-import { affinity } from './affinity.ts';
+import type { Affinity } from './affinity.ts';
 
 /** The extent, to the last bit that Brent's own tolerance allows; all species mixed, mole fractions. */
-export function solveByBrent(problem: ExtentProblem): number {
+export function solveByBrent(problem: ExtentProblem, affinity: Affinity): number {
   const [lowest, highest] = extentLimits(problem.stoichiometry, problem.feed);
-  return brent((extent) => affinity(problem, extent), lowest, highest);
+  return brent(affinity(problem), lowest, highest);
 }
 
 function brent(f: (x: number) => number, lower: number, upper: number): number {
