@@ -13,3 +13,6 @@ export const STANDARD_ATMOSPHERE_BAR = 1.01325;
 
 /** Gas constant, L bar/(mol K): the same, 1 L bar being 100 J exactly. */
 export const GAS_CONSTANT_L_BAR = 0.0831446261815324;
+
+/** By definition of the prefix. */
+export const JOULE_PER_KILOJOULE = 1000;

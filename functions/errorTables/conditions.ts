@@ -8,7 +8,7 @@ export const CONDITION_ERRORS = {
   },
   'condition-unknown': {
     says: '{argument} row {row} names {given}, which is no condition',
-    remedy: 'The conditions are {names}.',
+    remedy: '{suggestion}The conditions are {names}.',
   },
   'condition-twice': {
     says: '{argument} row {row} gives {name} again; row {first} gave it first',

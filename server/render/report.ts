@@ -8,6 +8,7 @@ import { answers } from './answers.ts';
 import { attention, matters, verdict } from './attention.ts';
 import { checks } from './checks.ts';
 import { limitsOfUse, versions } from './closing.ts';
+import { documentShell } from './documentShell.ts';
 import { stylesheet } from './style/stylesheet.ts';
 import { given, otherValues } from './given.ts';
 import { html, type Markup } from './html.ts';
@@ -30,24 +31,12 @@ export interface ServedParts {
 export function renderReport(evaluation: Evaluation, served: ServedParts = {}): string {
   const page = pageOf(evaluation);
   const lines = matters(page);
-  return html`<!DOCTYPE html>
-    <html lang="en">
-      <head>
-        <meta charset="utf-8" />
-        <meta name="viewport" content="width=device-width, initial-scale=1" />
-        <meta name="color-scheme" content="light dark" />
-        <title>${evaluation.workbook.title}</title>
-        <style>
-          ${stylesheet(evaluation.workbook)} ${served.style ?? null}
-        </style>
-      </head>
-      <body>
-        ${served.top ?? null} ${titleBlock(page)}
-        <main>
-          ${otherValues(page)} ${verdict(page, lines.length)} ${answers(page)}
-          ${(served.given ?? given)(page)} ${stepSection(page)} ${checks(page)} ${attention(lines)}
-          ${limitsOfUse()} ${versions(page)} ${sourceSheets(page)}
-        </main>
-      </body>
-    </html> `.markup;
+  const style = html`${stylesheet(evaluation.workbook)} ${served.style ?? null}`;
+  const body = html`${served.top ?? null} ${titleBlock(page)}
+    <main>
+      ${otherValues(page)} ${verdict(page, lines.length)} ${answers(page)} ${(served.given ?? given)(page)}
+      ${stepSection(page)} ${checks(page)} ${attention(lines)} ${limitsOfUse()} ${versions(page)}
+      ${sourceSheets(page)}
+    </main>`;
+  return documentShell({ title: evaluation.workbook.title, style, body }).markup;
 }

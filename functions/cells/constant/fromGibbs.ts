@@ -1,12 +1,10 @@
-import { GAS_CONSTANT } from '../../data/constants.ts';
+import { GAS_CONSTANT, JOULE_PER_KILOJOULE } from '../../data/constants.ts';
 import { inputError } from '../../errors.ts';
 import { defineFunction } from '../entry.ts';
 import { TEMPERATURE_UNIT } from '../parameters/common.ts';
 import { number } from '../parameters/number.ts';
 import { isHoldable } from '../problem/holdable.ts';
 import { kelvin } from '../problem/kelvin.ts';
-
-const JOULE_PER_KILOJOULE = 1000;
 
 export const kFromGibbs = defineFunction({
   name: 'K.FROM.GIBBS',

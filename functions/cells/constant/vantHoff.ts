@@ -1,4 +1,4 @@
-import { GAS_CONSTANT } from '../../data/constants.ts';
+import { GAS_CONSTANT, JOULE_PER_KILOJOULE } from '../../data/constants.ts';
 import { inputError } from '../../errors.ts';
 import { defineFunction } from '../entry.ts';
 import { TEMPERATURE_UNIT } from '../parameters/common.ts';
@@ -6,8 +6,6 @@ import { number, positiveNumber } from '../parameters/number.ts';
 import { optional } from '../parameters/optional.ts';
 import { isHoldable } from '../problem/holdable.ts';
 import { kelvin } from '../problem/kelvin.ts';
-
-const JOULE_PER_KILOJOULE = 1000;
 
 export const kVantHoff = defineFunction({
   name: 'K.VANTHOFF',

@@ -1,11 +1,9 @@
-import { GAS_CONSTANT } from '../../data/constants.ts';
+import { GAS_CONSTANT, JOULE_PER_KILOJOULE } from '../../data/constants.ts';
 import { defineFunction } from '../entry.ts';
 import { AMOUNTS, CONSTANT, EQUATION, NEEDED_CONDITIONS } from '../parameters/common.ts';
 import { mixtureSetup, reducedAffinity } from '../problem/affinity.ts';
 import { statedLnK } from '../problem/constant.ts';
 import { temperatureK } from '../problem/state.ts';
-
-const JOULE_PER_KILOJOULE = 1000;
 
 export const reactionAffinity = defineFunction({
   name: 'REACTION.AFFINITY',

@@ -1,3 +1,4 @@
+import { documentShell } from '../../render/documentShell.ts';
 import { html, type Markup, type Part, verbatim } from '../../render/html.ts';
 import { COLUMNS } from '../../render/style/columns.ts';
 import { INK } from '../../render/style/ink.ts';
@@ -17,26 +18,13 @@ export interface Document {
 
 /** A page of the server that is no sheet, on the same pad. */
 export function documentOf({ title, about, top, content }: Document): string {
-  return html`<!DOCTYPE html>
-    <html lang="en">
-      <head>
-        <meta charset="utf-8" />
-        <meta name="viewport" content="width=device-width, initial-scale=1" />
-        <meta name="color-scheme" content="light dark" />
-        <title>${title}</title>
-        <style>
-          ${STYLE}
-        </style>
-      </head>
-      <body>
-        ${top}
-        <header class="title-block">
-          <div class="job">
-            <h1>${title}</h1>
-            <p class="about">${about}</p>
-          </div>
-        </header>
-        <main>${content}</main>
-      </body>
-    </html> `.markup;
+  const body = html`${top}
+    <header class="title-block">
+      <div class="job">
+        <h1>${title}</h1>
+        <p class="about">${about}</p>
+      </div>
+    </header>
+    <main>${content}</main>`;
+  return documentShell({ title, style: STYLE, body }).markup;
 }
