@@ -16,4 +16,6 @@ export const NARROW = `@media (max-width: 46rem) {
   .pad > tbody > tr > td:first-child br { display: none; }
   .pad > tbody > tr > td:first-child > * { margin-right: 0.6rem; }
   .row.heading { padding-block: 1.2rem 0.4rem; }
+  .facts, .amounts { display: block; overflow-x: auto; }
+  .facts td { overflow-wrap: anywhere; }
 }`;
