@@ -65,7 +65,7 @@ export const AMOUNT_ERRORS = {
     remedy: 'Give all species in one unit, or state a medium.',
   },
   'amounts-fraction': {
-    says: '{place} is in {unit}, which may mean moles or mass where it is no gas',
+    says: '{place} is in {unit}, which may mean moles or mass of what is no gas',
     remedy: 'Write mol % or mol/mol, or give mol or kg.',
   },
   'amounts-dissolved': {

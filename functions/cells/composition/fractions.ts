@@ -71,7 +71,7 @@ export const compositionFractions = defineFunction({
   },
 });
 
-/** A species on two lines, a bare per cent of what is no gas, or an untagged line where a phase is asked for. */
+/** A species on two lines, a bare per cent of what is tagged as no gas, or an untagged line where a phase is asked for. */
 function refuseUnclear(form: TableForm, species: readonly Species[], phase: string | undefined): void {
   species.forEach(({ text, phase: tag }, position) => {
     const line = form.lines[position]!;
@@ -80,7 +80,7 @@ function refuseUnclear(form: TableForm, species: readonly Species[], phase: stri
     if (first !== position) {
       throw inputError('amounts-twice', { place, first: linePlace(form, form.lines[first]!) });
     }
-    if (line.unit?.quantity === 'fraction' && tag !== 'g') {
+    if (line.unit?.quantity === 'fraction' && tag !== null && tag !== 'g') {
       throw inputError('amounts-fraction', { place, unit: line.unit.text });
     }
     if (phase !== undefined && tag === null) throw inputError('phase-unknown-line', { place });

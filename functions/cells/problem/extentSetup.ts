@@ -97,7 +97,7 @@ function checkAsGiven({ medium, mixed, change }: Setting, { form, factors, react
   throw inputError('amounts-as-given', { place: linePlace(form, line), unit: unitText(line) });
 }
 
-/** A bare `%` or `ppm` is common for the moles of a gas; of a liquid or a solute it may mean mass. */
+/** A bare `%` or `ppm` is common for the moles of a gas; of a liquid, a solid or a solute it may mean mass. */
 function checkFractions(
   { medium }: Setting,
   { form, reacting }: MatchedLines,
@@ -106,7 +106,9 @@ function checkFractions(
   if (medium === 'gas') return;
   reacting.forEach((position, i) => {
     const line = form.lines[position]!;
-    if (line.unit?.quantity !== 'fraction' || species[i]!.phase === 'g') return;
+    const tag = species[i]!.phase;
+    const isClear = tag === 'g' || (tag === null && medium === 'as given');
+    if (line.unit?.quantity !== 'fraction' || isClear) return;
     throw inputError('amounts-fraction', { place: linePlace(form, line), unit: line.unit.text });
   });
 }

@@ -232,3 +232,26 @@ describe('standard uncertainties', () => {
     expect(message).toContain('expanded uncertainty (k=2)');
   });
 });
+
+describe('a bare per cent', () => {
+  const ASKED = '=EXTENT.SOLVE("CO + H2O = CO2 + H2", 1, A1:C4)';
+  const shift = (tag: string, unit: string): CellTable => [
+    [`CO${tag}`, 40, unit],
+    [`H2O${tag}`, 40, unit],
+    [`CO2${tag}`, 0, unit],
+    [`H2${tag}`, 20, unit],
+  ];
+
+  it('is taken as it is given where no tag says otherwise', () => {
+    // x (20 + x) = (40 - x)^2, so x = 16
+    expect(numberOf(ASKED, { A1: shift('', '%') })).toBeCloseTo(16, 12);
+    expect(numberOf(ASKED, { A1: shift('', 'mol %') })).toBeCloseTo(16, 12);
+  });
+
+  it('is the amount fraction of a gas, and an error of a liquid', () => {
+    const tagged = (tag: string) => ASKED.replace(/(CO2|CO|H2O|H2)(?= )|(H2)(?=")/g, `$&${tag}`);
+    expect(numberOf(tagged('(g)'), { A1: shift('(g)', '%') })).toBeCloseTo(16, 12);
+    const liquid = tagged('(l)').replace('A1:C4', 'A1:C4, CONDITIONS.TABLE("medium", "ideal liquid", "")');
+    expect(messageFrom('amounts-fraction', liquid, { A1: shift('(l)', '%') })).toContain('row 1 (CO(l))');
+  });
+});
