@@ -2,8 +2,8 @@
  * Registers the catalogue with a formula engine, the caller's own copy of HyperFormula.
  *
  * The engine's module and CommonJS builds do not know each other's classes, so nothing of the
- * engine is imported here: the caller hands over the build that it uses. This is the only file
- * of the functions that knows the engine.
+ * engine but its types is imported here: the caller hands over the build that it uses. Of the
+ * functions this file and the folder of its name alone know the engine.
  */
 import type { CellError } from 'hyperformula';
 import { catalogue } from './catalogue.ts';

@@ -2,20 +2,18 @@
  * From the words of a sheet to a problem for the one-reaction solver, and back to the units of the sheet.
  */
 import type { CheckedReaction } from '../../chemistry/balancedEquation.ts';
-import { matchSpecies } from '../../chemistry/match.ts';
 import { GAS_CONSTANT_L_BAR } from '../../data/constants.ts';
 import type { ExtentProblem } from '../../equilibrium/extentProblem.ts';
 import { inputError } from '../../errors.ts';
 import type { AmountsTable } from '../reading/amounts.ts';
 import { type Conditions, NO_CONDITIONS } from '../reading/conditions.ts';
-import { linePlace } from '../reading/tableForm.ts';
-import { unitText } from './basis.ts';
 import { lnReference } from './constant.ts';
 import type { MatchedLines } from './matchedLines.ts';
 import { feedOf } from './feed.ts';
 import { type Setting, settingOf } from './medium.ts';
 import { mixedInert } from './mixedInert.ts';
 import { pressureBar, temperatureK, volumeL } from './state.ts';
+import { refuseUnclearWords } from './unclearWords.ts';
 
 export interface ExtentSetup {
   readonly reaction: CheckedReaction;
@@ -41,10 +39,7 @@ export function extentSetup(
 ): ExtentSetup {
   const setting = settingOf(conditions, reaction);
   const { matched, feed } = feedOf(reaction, table, conditions.rows.has('removal'));
-  checkInert(reaction, conditions, matched);
-  checkAsGiven(setting, matched);
-  checkFractions(setting, matched, reaction);
-  checkDissolved(setting, matched, reaction, conditions);
+  refuseUnclearWords(reaction, conditions, setting, matched);
   const { change, mixed, isFraction } = setting;
   const lnBasisShift = change === 0 ? 0 : change * lnReference(setting, conditions, matched.reference);
   const problem: ExtentProblem = {
@@ -86,57 +81,6 @@ function inertAmount({ medium }: Setting, matched: MatchedLines, { amounts }: Am
   let sum = 0;
   for (const { position, factor } of mixedInert(matched, medium)) sum += amounts[position]! * factor();
   return sum;
-}
-
-/** K for amounts as given speaks of one unit; with several, only a reaction in which it cancels is clear. */
-function checkAsGiven({ medium, mixed, change }: Setting, { form, factors, reacting }: MatchedLines): void {
-  if (medium !== 'as given' || change === 0) return;
-  const other = factors.findIndex((factor, i) => mixed[i] && factor !== 1);
-  if (other === -1) return;
-  const line = form.lines[reacting[other]!]!;
-  throw inputError('amounts-as-given', { place: linePlace(form, line), unit: unitText(line) });
-}
-
-/** A bare `%` or `ppm` is common for the moles of a gas; of a liquid, a solid or a solute it may mean mass. */
-function checkFractions(
-  { medium }: Setting,
-  { form, reacting }: MatchedLines,
-  { species }: CheckedReaction,
-): void {
-  if (medium === 'gas') return;
-  reacting.forEach((position, i) => {
-    const line = form.lines[position]!;
-    const tag = species[i]!.phase;
-    const isClear = tag === 'g' || (tag === null && medium === 'as given');
-    if (line.unit?.quantity !== 'fraction' || isClear) return;
-    throw inputError('amounts-fraction', { place: linePlace(form, line), unit: line.unit.text });
-  });
-}
-
-/** Constants of dissolved species are stated in mol/L; with amounts as given in mmol/L one of the two is meant. */
-function checkDissolved(
-  { medium, mixed, change }: Setting,
-  { form, reacting, reference }: MatchedLines,
-  { species }: CheckedReaction,
-  { rows }: Conditions,
-): void {
-  if (medium !== 'as given' || rows.has('medium') || rows.has('K in terms of') || change === 0) return;
-  if (reference === null || DISSOLVED_UNITS.includes(reference.text)) return;
-  const dissolved = species.findIndex(({ phase }, i) => phase === 'aq' && mixed[i]);
-  if (dissolved === -1) return;
-  const line = form.lines[reacting[dissolved]!]!;
-  throw inputError('amounts-dissolved', { place: linePlace(form, line), unit: reference.text });
-}
-
-const DISSOLVED_UNITS = ['mol/L', 'mol/kg'];
-
-/** A species named as inert must be fed and must not stand in the equation. */
-function checkInert(reaction: CheckedReaction, conditions: Conditions, { form, inert }: MatchedLines): void {
-  for (const name of conditions.inert) {
-    if (inert.some(({ position }) => form.lines[position]!.species === name)) continue;
-    if (matchSpecies({ species: inert.map(({ species }) => species()) }, name) !== null) continue;
-    throw inputError('condition-inert', { name, equation: reaction.text });
-  }
 }
 
 function wrongBasis({ unitText: unit }: MatchedLines, medium: string, wanted: string) {
