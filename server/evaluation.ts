@@ -5,6 +5,7 @@
  * are functions of it alone and need no engine.
  */
 import type { Outcome } from '../functions/equilibrium/outcome.ts';
+import { readReference, type Reference, spanned } from './workbook/address.ts';
 
 export interface Evaluation {
   /** Version of this format. */
@@ -116,4 +117,12 @@ export interface CheckResult {
 /** Whether the value is an error. */
 export function isError(value: Value): value is ErrorValue {
   return typeof value === 'object' && value !== null;
+}
+
+/** The cells that the answer of the formula at this address fills. */
+export function cellsFilled(address: string, { lastCell }: FormulaCell): Reference {
+  const first = readReference(address);
+  const last = lastCell === null ? first : readReference(lastCell);
+  if (first === null || last === null) throw new Error(`invariant: ${address} is the address of a cell`);
+  return spanned(first, last);
 }

@@ -5,6 +5,7 @@ import { type CheckResult, type Evaluation, isError, type Value } from '../evalu
 import { foundDigits, toleranceText } from '../render/checkNumbers.ts';
 import { numberText } from '../render/numberText.ts';
 import { isSettled } from '../render/statusWords.ts';
+import { isRows } from '../workbook/model.ts';
 import { endingLines, endingsAt, equilibria } from './equilibria.ts';
 import type { Evaluated } from './evaluation.ts';
 
@@ -116,8 +117,4 @@ function valueText(value: Value, digits: number | null = null): string {
 
 function valuesOf(value: Value | readonly (readonly Value[])[]): readonly Value[] {
   return isRows(value) ? value.flat() : [value];
-}
-
-function isRows(value: unknown): value is readonly (readonly Value[])[] {
-  return Array.isArray(value);
 }

@@ -1,7 +1,7 @@
 /** The equilibria that the cells of a workbook solved, and how each ended. */
 import type { Status } from '../../functions/equilibrium/outcome.ts';
-import type { Evaluation } from '../evaluation.ts';
-import { readReference, type Reference } from '../workbook/address.ts';
+import { cellsFilled, type Evaluation } from '../evaluation.ts';
+import { cellsShared, readReference } from '../workbook/address.ts';
 
 export interface Equilibrium {
   readonly cell: string;
@@ -27,7 +27,7 @@ export function equilibria({ formulas }: Evaluation): Equilibrium[] {
 export function endingsAt(address: string, evaluation: Evaluation): string[] {
   const area = readReference(address)!;
   const endings = equilibria(evaluation)
-    .filter(({ cell }) => isShared(area, filled(cell, evaluation)))
+    .filter(({ cell }) => cellsShared(area, cellsFilled(cell, evaluation.formulas[cell]!)) > 0)
     .filter(({ status }) => status !== 'settled');
   return [...new Set(endings.map(ending))];
 }
@@ -48,20 +48,4 @@ export function endingLines(solved: readonly Equilibrium[]): string[] {
 
 function ending({ status, reason }: Equilibrium): string {
   return reason === '' ? status : `${status} (${reason})`;
-}
-
-function filled(cell: string, { formulas }: Evaluation): Reference {
-  const first = readReference(cell)!;
-  const last = readReference(formulas[cell]!.lastCell ?? cell)!;
-  return { ...first, lastRow: last.lastRow, lastColumn: last.lastColumn };
-}
-
-function isShared(a: Reference, b: Reference): boolean {
-  return (
-    a.sheet === b.sheet &&
-    a.firstRow <= b.lastRow &&
-    b.firstRow <= a.lastRow &&
-    a.firstColumn <= b.lastColumn &&
-    b.firstColumn <= a.lastColumn
-  );
 }

@@ -1,11 +1,12 @@
 /** What `evaluate` and `render` have in common: from the words on the command line to an evaluation. */
 import { evaluateWorkbook } from '../engine/evaluateWorkbook.ts';
 import type { Given } from '../engine/host.ts';
-import { type Evaluation, isError, type OutputValue, type Value } from '../evaluation.ts';
+import { type Evaluation, isError, type OutputValue } from '../evaluation.ts';
 import { givenByName } from '../givenText.ts';
 import type { OwnFunctions } from '../engine/ownFunctions.ts';
 import { loadOwnFunctions } from '../ownFunctions.ts';
 import { serverError } from '../problems.ts';
+import { isRows } from '../workbook/model.ts';
 import { ExitCode } from './exitCode.ts';
 import { readWorkbook } from './readWorkbook.ts';
 import type { Surroundings } from './surroundings.ts';
@@ -54,5 +55,5 @@ export function exitCodeOf({ outputs, checks }: Evaluation): number {
 }
 
 function holdsError({ value }: OutputValue): boolean {
-  return Array.isArray(value) ? value.flat().some(isError) : isError(value as Value);
+  return isRows(value) ? value.flat().some(isError) : isError(value);
 }

@@ -4,7 +4,7 @@
 import type { Status } from '../../functions/equilibrium/outcome.ts';
 import type { CheckResult, FunctionAnswer, OutputValue, Value } from '../evaluation.ts';
 import { isError } from '../evaluation.ts';
-import type { Check, Expectation, Expected, Tolerance } from '../workbook/model.ts';
+import { type Check, type Expectation, type Expected, isRows, type Tolerance } from '../workbook/model.ts';
 
 /** The statuses of the equilibria that a cell solved. */
 export function statusesOf(answers: readonly FunctionAnswer[]): Status[] {
@@ -54,10 +54,6 @@ function agrees(expected: Expected, found: Value, within: Tolerance | null): boo
 function isNear(expected: number, found: number, within: Tolerance): boolean {
   const allowed = 'absolute' in within ? within.absolute : within.relative * Math.abs(expected);
   return Math.abs(found - expected) <= allowed;
-}
-
-function isRows<Cell>(value: Cell | readonly (readonly Cell[])[]): value is readonly (readonly Cell[])[] {
-  return Array.isArray(value);
 }
 
 function isStatus(expected: Expected): expected is { readonly status: Status } {

@@ -66,7 +66,7 @@ export class Host {
     try {
       for (const { name, cell } of this.#workbook.inputs) {
         if (!Object.hasOwn(given, name)) continue;
-        const value = given[name]!;
+        const value = given[name] ?? null;
         engine.setCellContents(this.#cells.place(cell), typeof value === 'string' ? asText(value) : value);
       }
     } finally {

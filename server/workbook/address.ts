@@ -130,3 +130,20 @@ export function rowCount(area: Area): number {
 export function columnCount(area: Area): number {
   return area.lastColumn - area.firstColumn + 1;
 }
+
+/** How many cells two rectangles share. */
+export function cellsShared(a: Reference, b: Reference): number {
+  if (a.sheet !== b.sheet) return 0;
+  const rows = Math.min(a.lastRow, b.lastRow) - Math.max(a.firstRow, b.firstRow) + 1;
+  const columns = Math.min(a.lastColumn, b.lastColumn) - Math.max(a.firstColumn, b.firstColumn) + 1;
+  return Math.max(0, rows) * Math.max(0, columns);
+}
+
+export function cellCount(area: Area): number {
+  return rowCount(area) * columnCount(area);
+}
+
+/** The rectangle from the first cell of one to the last cell of another, on the sheet of the first. */
+export function spanned(first: Reference, last: Area): Reference {
+  return { ...first, lastRow: last.lastRow, lastColumn: last.lastColumn };
+}

@@ -89,9 +89,11 @@ export interface Expectation {
  */
 export type Expected = Scalar | null | { readonly error: string } | { readonly status: Status };
 
-/** Whether rows of values are expected. */
-export function isRows(expected: Expectation['expected']): expected is readonly (readonly Expected[])[] {
-  return Array.isArray(expected);
+/** Whether these are rows of values, and not one. */
+export function isRows<Cell>(
+  value: Cell | readonly (readonly Cell[])[],
+): value is readonly (readonly Cell[])[] {
+  return Array.isArray(value);
 }
 
 /** How far a number may lie from the expected one. */

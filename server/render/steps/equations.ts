@@ -1,5 +1,5 @@
 /** The equations that a step works on, typeset: as the author wrote them, or else as they were solved. */
-import { cellCount } from './overlaps.ts';
+import { cellCount } from '../../workbook/address.ts';
 import { formulaTokens } from '../../workbook/formulaTokens.ts';
 import { isExtent } from '../evidence/evidence.ts';
 import type { Markup } from '../html.ts';

@@ -1,5 +1,5 @@
 /** Which rectangles of cells a reference meets, without visiting every cell of a large range. */
-import { cellName, columnCount, rowCount, type Reference } from '../../workbook/address.ts';
+import { cellCount, cellName, cellsShared, columnCount, type Reference } from '../../workbook/address.ts';
 
 export interface Filling {
   readonly fills: Reference;
@@ -19,18 +19,6 @@ export function meeting<Item extends Filling>(items: readonly Item[]): Meeting<I
     const met = new Set(cellKeys(reference).flatMap((cell) => byCell.get(cell) ?? []));
     return [...met].sort((a, b) => (order.get(a) ?? 0) - (order.get(b) ?? 0));
   };
-}
-
-/** How many cells two rectangles share. */
-export function cellsShared(a: Reference, b: Reference): number {
-  if (a.sheet !== b.sheet) return 0;
-  const rows = Math.min(a.lastRow, b.lastRow) - Math.max(a.firstRow, b.firstRow) + 1;
-  const columns = Math.min(a.lastColumn, b.lastColumn) - Math.max(a.firstColumn, b.firstColumn) + 1;
-  return Math.max(0, rows) * Math.max(0, columns);
-}
-
-export function cellCount(area: Reference): number {
-  return rowCount(area) * columnCount(area);
 }
 
 /** Every cell of a rectangle, row by row. */

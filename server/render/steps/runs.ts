@@ -3,8 +3,8 @@
  *
  * A table with a case on each row is one run for each of its columns, however long it is.
  */
-import type { Evaluation } from '../../evaluation.ts';
-import { columnCount, readArea, readReference, rowCount, type Reference } from '../../workbook/address.ts';
+import { cellsFilled, type Evaluation } from '../../evaluation.ts';
+import { columnCount, rowCount, spanned, type Reference } from '../../workbook/address.ts';
 import type { PlacedFormula } from './placedFormula.ts';
 import { relativeFormula } from './relativeFormula.ts';
 
@@ -35,18 +35,11 @@ function placedFormulas(evaluation: Evaluation): PlacedFormula[] {
   const sheetOrder = new Map(Object.keys(evaluation.sheets).map((sheet, index) => [sheet, index]));
   const order = ({ sheet }: Reference) => sheetOrder.get(sheet) ?? sheetOrder.size;
   return Object.entries(evaluation.formulas)
-    .map(([address, formula]) => ({ address, formula, fills: filled(address, formula.lastCell) }))
+    .map(([address, formula]) => ({ address, formula, fills: cellsFilled(address, formula) }))
     .sort(
       ({ fills: a }, { fills: b }) =>
         order(a) - order(b) || a.firstRow - b.firstRow || a.firstColumn - b.firstColumn,
     );
-}
-
-function filled(address: string, lastCell: string | null): Reference {
-  const first = readReference(address);
-  const last = lastCell === null ? first : (readReference(lastCell) ?? readArea(lastCell));
-  if (first === null || last === null) throw new Error(`invariant: ${address} is the address of a cell`);
-  return spanned(first, { ...last, sheet: first.sheet });
 }
 
 /** The formulas that continue `first` in steps of so many rows and columns. */
@@ -73,10 +66,6 @@ function shifted(area: Reference, rows: number, columns: number): Reference {
     firstColumn: area.firstColumn + columns,
     lastColumn: area.lastColumn + columns,
   };
-}
-
-function spanned(first: Reference, last: Reference): Reference {
-  return { ...first, lastRow: last.lastRow, lastColumn: last.lastColumn };
 }
 
 /** Formulas are followed only by formulas whose answers have the same size, so the whole area is the key. */

@@ -1,11 +1,11 @@
 /** The results of a step: one value, an array answer, or the first of a run with the run's range. */
 import { isError, type Value } from '../../evaluation.ts';
-import { readReference } from '../../workbook/address.ts';
+import { cellCount, cellsShared, readReference } from '../../workbook/address.ts';
 import { html, type Markup } from '../html.ts';
 import { alignedNumber, tailWidth } from '../numberText.ts';
 import type { Page } from '../page.ts';
 import { rangeMarkup, resultMarkup } from '../values.ts';
-import { cellCount, cellsOf, cellsShared } from './overlaps.ts';
+import { cellsOf } from './overlaps.ts';
 import type { PlacedFormula } from './placedFormula.ts';
 import { hasSingleAnswers, isRun, type Step } from './steps.ts';
 

@@ -1,7 +1,7 @@
 /** The steps of a calculation: its formulas in reading order, each knowing what it comes from. */
 import type { Evaluation } from '../../evaluation.ts';
-import { isOneCell, type Reference } from '../../workbook/address.ts';
-import { cellCount, cellsShared, meeting, type Meeting } from './overlaps.ts';
+import { cellCount, cellsShared, isOneCell, type Reference } from '../../workbook/address.ts';
+import { meeting, type Meeting } from './overlaps.ts';
 import { inReadingOrder, referencesOf, type Numbered } from './readingOrder.ts';
 import type { PlacedFormula } from './placedFormula.ts';
 import { formulaRuns } from './runs.ts';
